@@ -1,0 +1,50 @@
+// Bundles everything that is shipped into dist/: nothing is installed or loaded from node_modules at run time.
+// `--silent` prints nothing on success; a failing bundle ends with exit code 1.
+import { chmodSync, existsSync, statSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { build } from 'esbuild';
+
+const root = dirname(fileURLToPath(import.meta.url));
+const silent = process.argv.includes('--silent');
+
+const shared = {
+  absWorkingDir: root,
+  bundle: true,
+  minify: true,
+  charset: 'utf8',
+  legalComments: 'none',
+  logLevel: silent ? 'error' : 'warning',
+  // Some packages' `main` is UMD, which bundles without complaint and fails when it runs: their `module` entry first.
+  mainFields: ['module', 'main'],
+  define: { 'process.env.NODE_ENV': '"production"' },
+};
+const node = { ...shared, platform: 'node', format: 'cjs', target: 'node20' };
+const page = { ...shared, platform: 'browser', format: 'iife', target: 'es2022' };
+
+const bundles = [
+  {
+    ...node,
+    entryPoints: ['extension/cli/main.ts'],
+    outfile: 'dist/giantpulse.cjs',
+    banner: { js: '#!/usr/bin/env node' },
+  },
+  { ...node, entryPoints: ['extension/server/main.ts'], outfile: 'dist/server.cjs' },
+  { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },
+  { ...page, entryPoints: { readout: 'webview/readout.ts' }, outdir: 'dist' },
+].filter(({ entryPoints }) => Object.values(entryPoints).every((entry) => existsSync(join(root, entry))));
+
+try {
+  await Promise.all(bundles.map((options) => build(options)));
+  if (existsSync(join(root, 'dist/giantpulse.cjs'))) chmodSync(join(root, 'dist/giantpulse.cjs'), 0o755);
+} catch {
+  // esbuild has already said what is wrong and where.
+  process.exit(1);
+}
+if (!silent) {
+  for (const file of ['giantpulse.cjs', 'server.cjs', 'extension.cjs', 'readout.js', 'readout.css']) {
+    const path = join(root, 'dist', file);
+    if (existsSync(path))
+      console.log(`dist/${file.padEnd(16)} ${(statSync(path).size / 1000).toFixed(1).padStart(7)} kB`);
+  }
+}
