@@ -241,7 +241,7 @@ describe('the figures agree with each other', () => {
 
   // From memory (Koechner; Kaminskii; Weber; Payne; Kuleshov; Moulton; Laporta; Campbell & Suratwala): ranges only.
   // [medium, nm, upper-level lifetime in us, thermal conductivity in W/(m.K), nonlinear index in 1e-20 m2/W]
-  it.each([
+  it.each<[string, number, ...(number | undefined)[]]>([
     ['Nd:YAG', 1064, 230, 260, 10.1, 14, 6.13, 9.41],
     ['Nd:YVO4', 1064, 50, 110, 5.1, 12, 14.9, 15.6],
     ['Nd:GdVO4', 1063, 90, 95, 8, 12, 14, 16],
@@ -259,7 +259,7 @@ describe('the figures agree with each other', () => {
     ['alexandrite', 755, 100, 260, 22, 24, 3.5, 3.6],
     ['ruby', 694.3, 2900, 3100, 35, 42, 2.85, 2.95],
     ['Ti:sapphire', 790, 3.1, 3.3, 33, 46, 2.9, 3.1],
-  ] as const)('%s %d nm: recalled figures within the spread of the handbooks', (name, at, ...ends) => {
+  ])('%s %d nm: recalled figures within the spread of the handbooks', (name, at, ...ends) => {
     const names = ['upper_level_lifetime', 'thermal_conductivity', 'nonlinear_index'] as const;
     const units = [1e-6, 1, 1e-20];
     for (const [index, what] of names.entries()) {

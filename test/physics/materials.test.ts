@@ -204,6 +204,27 @@ describe('finding a material', () => {
     }
   });
 
+  it("lets a line's figure win over the host's, and leaves out what can't be read", () => {
+    const written = (value: string) => ({ value, source: 'made up for this test' });
+    const line = {
+      wavelength: '1 um',
+      strongest: true,
+      pump_wavelengths: [],
+      figures: { refractive_index: written('1.7'), lifetime: written('3 parsecs') },
+    };
+    const host = { refractive_index: written('1.5'), ion_density: written('1e20 cm-3') };
+    const medium = { name: 'A', composition: 'A', aliases: [], kind: 'three_level', figures: host, lines: [line] };
+    const { figures } = findLine(medium, 1e-6) ?? { figures: {} };
+    expect(Object.keys(figures).sort()).toEqual(['ion_density', 'refractive_index']);
+    expect(figure(figures, 'refractive_index')).toEqual({
+      value: 1.7,
+      text: '1.7',
+      source: 'made up for this test',
+      fromMemory: false,
+    });
+    expect(figure(figures, 'ion_density').value).toBeCloseTo(1e26, -13);
+  });
+
   it('answers any text and any number without an exception', () => {
     fc.assert(
       fc.property(fc.string({ unit: 'binary' }), fc.double(), (text, number) => {
