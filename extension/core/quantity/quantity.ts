@@ -1,6 +1,7 @@
 import type { Fix, TextRange } from '../report/problem.ts';
 import type { DimensionName } from './dimension.ts';
-import { explain, tooLong } from './explain.ts';
+import { explain } from './explain.ts';
+import { tooLong } from './explain-number.ts';
 import { read } from './read.ts';
 
 /** A number with its unit, and how it was written. */
@@ -43,11 +44,10 @@ export function readQuantity(
   text: string,
   dimension: DimensionName,
 ): { readonly quantity: Quantity } | { readonly problem: QuantityProblem } {
-  if (text.length > LONGEST_TEXT) return { problem: tooLong(text, dimension) };
   const trimmed = text.trim();
-  const result = read(trimmed, dimension);
-  if (!('failure' in result)) return { quantity: result };
-  const problem = explain(trimmed, result, dimension);
+  const result = trimmed.length > LONGEST_TEXT ? undefined : read(trimmed, dimension);
+  if (result !== undefined && !('failure' in result)) return { quantity: result };
+  const problem = result === undefined ? tooLong(trimmed, dimension) : explain(trimmed, result, dimension);
   const offset = text.length - text.trimStart().length;
   return { problem: offset === 0 ? problem : moved(problem, trimmed === '' ? 0 : offset) };
 }

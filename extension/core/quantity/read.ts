@@ -1,40 +1,8 @@
 import { DIMENSIONS, type DimensionName, sameDimension } from './dimension.ts';
+import type { Failure } from './failure.ts';
+import { type Measure, readMeasure, toSi, vanishes } from './measure.ts';
 import type { Quantity } from './quantity.ts';
-import { CELSIUS_ZERO, type Unit } from './symbols.ts';
-import { parseUnit, type UnitFault } from './unit.ts';
-
-/** Why a text is no quantity, and the part of it that is to blame. */
-export interface Failure {
-  readonly failure:
-    | 'number'
-    | 'missing-unit'
-    | 'unit'
-    | 'dimension'
-    | 'overflow'
-    | 'underflow'
-    | 'tolerance-empty'
-    | 'tolerance-unreadable'
-    | 'tolerance-negative'
-    | 'tolerance-dimension'
-    | 'tolerance-celsius-percent';
-  readonly start: number;
-  readonly end: number;
-  /** For a unit that can't be read: what is wrong within `start` to `end`. */
-  readonly detail?: UnitFault;
-}
-
-interface Measure {
-  readonly mantissa: string;
-  readonly exponent: number;
-  /** As written, sign and exponent included. */
-  readonly number: string;
-  readonly unitText: string;
-  /** Nothing if no unit is written. */
-  readonly unit: Unit | undefined;
-}
-
-const NUMBER = /^([+-]?(?:\d+\.?\d*|\.\d+))(?:[eE]([+-]?\d+))?\s*/;
-const UNIT_START = /^(?:1?\s*\/|[^\d\s.,;:*^+\-_'~<>=!?"#&|@])/;
+import { CELSIUS_ZERO } from './symbols.ts';
 
 /** `±`, `+/-` or `+-`; not global, so that it holds no state. */
 export const PLUS_MINUS = /\u00b1|\+\/?[-\u2212]/;
@@ -52,10 +20,10 @@ export function read(text: string, dimension: DimensionName): Quantity | Failure
 
   const written = Number(main.number);
   const magnitude = toSi(main, main.unit);
-  if (!Number.isFinite(written) || !Number.isFinite(magnitude)) return { failure: 'overflow', start: 0, end };
+  // In hundredths, so that -40 Cel is exactly 233.15 K; and -0 becomes 0.
+  const value = main.unit?.kind === 'celsius' ? (magnitude * 100 + CELSIUS_ZERO) / 100 : magnitude + 0;
+  if (!Number.isFinite(written) || !Number.isFinite(value)) return { failure: 'overflow', start: 0, end };
   if (vanishes(main, written) || vanishes(main, magnitude)) return { failure: 'underflow', start: 0, end };
-  // Adding zero turns -0 into 0.
-  const value = main.unit?.kind === 'celsius' ? magnitude + CELSIUS_ZERO : magnitude + 0;
   const unit = main.unitText;
   if (mark < 0) return { value, written, unit };
   const tolerance = readTolerance(text, mark, main, magnitude, dimension);
@@ -90,36 +58,4 @@ function readTolerance(
   if (!Number.isFinite(width)) return { failure: 'overflow', start, end };
   if (vanishes(written, width) && magnitude !== 0) return { failure: 'underflow', start, end };
   return width < 0 ? { failure: 'tolerance-negative', start, end } : width + 0;
-}
-
-function readMeasure(text: string, offset: number): Measure | Failure {
-  const match = NUMBER.exec(text);
-  if (match === null) return { failure: 'number', start: offset, end: offset + text.length };
-  const [whole, mantissa = '', exponent] = match;
-  const unitText = text.slice(whole.length);
-  const number = whole.trimEnd();
-  const power = exponent === undefined ? 0 : Number(exponent);
-  if (unitText === '') return { mantissa, exponent: power, number, unitText, unit: undefined };
-  if (!UNIT_START.test(unitText)) return { failure: 'number', start: offset, end: offset + text.length };
-  const unit = parseUnit(unitText);
-  if ('fault' in unit) {
-    return { failure: 'unit', start: offset + whole.length, end: offset + text.length, detail: unit };
-  }
-  return { mantissa, exponent: power, number, unitText, unit };
-}
-
-/** The number in SI, without a temperature's zero; powers of ten go through the decimal text, so they never round. */
-function toSi(measure: Measure, unit: Unit | undefined): number {
-  // Bounded, because a power printed as `1e+21` would not read back.
-  const written = Math.max(-9999, Math.min(9999, measure.exponent));
-  if (unit === undefined) return Number(`${measure.mantissa}e${written}`);
-  const power = written + unit.exponent;
-  if (unit.times === 1 && unit.over === 1) return Number(`${measure.mantissa}e${power}`);
-  const scaled = (Number(measure.mantissa) * unit.times) / unit.over;
-  const printed = String(scaled);
-  return printed.includes('e') ? scaled * 10 ** power : Number(`${printed}e${power}`);
-}
-
-function vanishes(measure: Measure, value: number): boolean {
-  return value === 0 && /[1-9]/.test(measure.mantissa);
 }

@@ -1,14 +1,17 @@
 import { DIMENSIONS, type DimensionName, sameDimension } from './dimension.ts';
 import { SYMBOLS } from './symbols.ts';
 import { parseUnit } from './unit.ts';
+import { spelledOut } from './unit-words.ts';
 
 const MOST = 4;
+const LONGEST_UNIT = 20;
 
 /**
  * Units of the wanted dimension that look like an unreadable one, of which `from` to `to` is to blame: first what
  * differs from a usual unit by case or spelling alone, then full names (`microseconds`), then one wrong character.
  */
 export function suggestUnits(unit: string, from: number, to: number, dimension: DimensionName): readonly string[] {
+  if (unit.length > LONGEST_UNIT) return [];
   const usual = DIMENSIONS[dimension].units;
   const replaced = (by: string): string => unit.slice(0, from) + by + unit.slice(to);
   const fits = (candidate: string): boolean => {
@@ -35,51 +38,6 @@ function folded(unit: string): string {
     .toLowerCase()
     .replace(/[\u00b5\u03bc]/g, 'u')
     .replace(/\*\*|[\^\s]/g, '');
-}
-
-const PREFIX_WORDS: readonly (readonly [string, string])[] = [
-  ['femto', 'f'],
-  ['pico', 'p'],
-  ['nano', 'n'],
-  ['micro', 'u'],
-  ['milli', 'm'],
-  ['centi', 'c'],
-  ['kilo', 'k'],
-  ['mega', 'M'],
-  ['giga', 'G'],
-  ['tera', 'T'],
-];
-
-const UNIT_WORDS: Readonly<Record<string, string>> = {
-  micron: 'um',
-  metre: 'm',
-  meter: 'm',
-  second: 's',
-  sec: 's',
-  minute: 'min',
-  hour: 'h',
-  hertz: 'Hz',
-  joule: 'J',
-  watt: 'W',
-  ampere: 'A',
-  amp: 'A',
-  volt: 'V',
-  kelvin: 'K',
-  celsius: 'Cel',
-  degree: 'deg',
-  radian: 'rad',
-  inch: 'in',
-  percent: '%',
-};
-
-function spelledOut(word: string): readonly string[] {
-  const lower = word.toLowerCase().slice(0, 20);
-  const [prefix, symbol] = PREFIX_WORDS.find(
-    ([name]) => lower.startsWith(name) && lower !== 'micron' && lower !== 'microns',
-  ) ?? ['', ''];
-  const name = lower.slice(prefix.length);
-  const unit = Object.hasOwn(UNIT_WORDS, name) ? UNIT_WORDS[name] : UNIT_WORDS[name.replace(/s$/, '')];
-  return unit === undefined ? [] : [symbol + unit];
 }
 
 /** One character added, left out or changed, or two neighbours swapped, in something longer than one character. */

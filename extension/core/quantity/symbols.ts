@@ -1,7 +1,7 @@
 import type { DimensionVector } from './dimension.ts';
 
 /**
- * A unit as SI sees it: one of it is `times / over · 10^exponent`, above `offset` kelvin if it is a temperature point.
+ * A unit as SI sees it: one of it is `times / over · 10^exponent`, above the zero of Celsius if `kind` says so.
  * Powers of ten stay apart from the rest so that `100 us` becomes exactly 1e-4.
  */
 export interface Unit {
@@ -12,8 +12,8 @@ export interface Unit {
   readonly kind: 'plain' | 'ratio' | 'celsius';
 }
 
-/** kelvin; BIPM, The International System of Units, 9th ed. (2019), 2.3.1. */
-export const CELSIUS_ZERO = 273.15;
+/** Hundredths of a kelvin, so that it is a whole number; BIPM, The International System of Units, 9th ed. (2019), 2.3.1. */
+export const CELSIUS_ZERO = 27_315;
 
 // BIPM, SI brochure, 9th ed., table 7; `u` is UCUM's micro, then the micro sign and the Greek letter.
 const PREFIXES: readonly (readonly [string, number])[] = [
