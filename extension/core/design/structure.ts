@@ -1,0 +1,135 @@
+import type { Findings } from './finding.ts';
+import { CONDITIONS } from './generated/schema.ts';
+import validate, { type ValidationError } from './generated/validate.js';
+import { type Condition, keySchema, type SchemaNode } from './schema.ts';
+import { nearest } from './suggest.ts';
+import type { TreeNode } from './tree.ts';
+import { reportUnknownKey } from './unknown-keys.ts';
+import { clip, describeWrongType, exampleOf, listed, placeName } from './wording.ts';
+
+/** A broken rule with the value it concerns. */
+interface Fault {
+  readonly error: ValidationError;
+  readonly node: TreeNode;
+  readonly schema: SchemaNode | undefined;
+}
+
+/**
+ * Reports where a design departs from the schema's shape. `partial`: the text has syntax errors, so that what is
+ * missing may only be unread.
+ */
+export function checkStructure(root: TreeNode, schema: SchemaNode, partial: boolean, findings: Findings): void {
+  if (validate(root.data)) return;
+  const faults = (validate.errors ?? []).flatMap((error) => locate(error, root, schema));
+  const misspelt = new Set<string>();
+  for (const { error, node, schema: section } of faults) {
+    if (error.keyword !== 'additionalProperties') continue;
+    const meant = reportUnknownKey(node, error.params.additionalProperty ?? '', section, schema, findings);
+    // Then the key meant is not missing as well.
+    if (meant !== undefined) misspelt.add(`${node.path} ${meant}`);
+  }
+  for (const fault of faults) {
+    if (fault.node.kind === 'broken') continue;
+    report(fault, partial, misspelt, findings);
+  }
+}
+
+function locate(error: ValidationError, root: TreeNode, schema: SchemaNode): Fault[] {
+  let node: TreeNode | undefined = root;
+  let part: SchemaNode | undefined = schema;
+  for (const token of error.instancePath.split('/').slice(1)) {
+    const key = token.replaceAll('~1', '/').replaceAll('~0', '~');
+    node = node?.items?.[Number(key)] ?? node?.entries?.get(key);
+    part = part?.kind === 'list' ? part.item : keySchema(part, key);
+  }
+  return node === undefined ? [] : [{ error, node, schema: part }];
+}
+
+function report(fault: Fault, partial: boolean, misspelt: ReadonlySet<string>, findings: Findings): void {
+  switch (fault.error.keyword) {
+    case 'required':
+      if (!partial) reportMissing(fault, misspelt, findings);
+      break;
+    case 'minProperties':
+      reportEmpty(fault, findings);
+      break;
+    case 'not':
+      reportExcluded(fault, findings);
+      break;
+    case 'enum':
+    case 'const':
+      if (fault.node.kind === 'scalar') reportChoice(fault, findings);
+      else reportType(fault, findings);
+      break;
+    case 'type':
+      reportType(fault, findings);
+      break;
+    case 'minimum':
+    case 'maximum':
+      reportCount(fault, findings);
+      break;
+  }
+}
+
+function conditionOf({ error }: Fault): Condition | undefined {
+  return CONDITIONS[error.schemaPath.slice(0, error.schemaPath.lastIndexOf('/'))];
+}
+
+/** On the value that demands the key, if one does, else on the section that lacks it. */
+function reportMissing(fault: Fault, misspelt: ReadonlySet<string>, findings: Findings): void {
+  const { error, node, schema } = fault;
+  const key = error.params.missingProperty ?? '';
+  if (misspelt.has(`${node.path} ${key}`)) return;
+  const condition = conditionOf(fault);
+  const blamed = condition?.blame === undefined ? undefined : node.entries?.get(condition.blame);
+  const name = placeName(node.path);
+  const why = condition === undefined ? `${name} needs \`${key}\`` : `${name}: ${condition.because}`;
+  const message = `${why}. Add ${exampleOf(key, keySchema(schema, key))}.`;
+  findings.add('missing-key', node.path, blamed?.written ?? node.value, message);
+}
+
+function reportEmpty({ node, schema }: Fault, findings: Findings): void {
+  const keys = schema?.kind === 'section' ? listed(Object.keys(schema.keys)) : 'a key';
+  findings.add(
+    'missing-key',
+    node.path,
+    node.value,
+    `${placeName(node.path)} says nothing. Give ${keys}, or remove it.`,
+  );
+}
+
+function reportExcluded(fault: Fault, findings: Findings): void {
+  const { node } = fault;
+  const because = conditionOf(fault)?.because ?? 'another key excludes it';
+  findings.add(
+    'excluded-key',
+    node.path,
+    node.key ?? node.value,
+    `${placeName(node.path)} has no place here: ${because}.`,
+  );
+}
+
+function reportCount({ node, schema }: Fault, findings: Findings): void {
+  if (schema?.kind !== 'count') return;
+  const text = clip(node.text ?? '');
+  const message = `${placeName(node.path)} is ${text}; it must be from ${schema.least} to ${schema.most}.`;
+  findings.add('out-of-range', node.path, node.written, message);
+}
+
+function reportType({ node, schema }: Fault, findings: Findings): void {
+  if (schema === undefined) return;
+  const code = node.kind === 'null' ? 'missing-value' : 'wrong-type';
+  const where = node.kind === 'scalar' ? node.written : node.value;
+  findings.add(code, node.path, where, describeWrongType(node, schema));
+}
+
+function reportChoice({ node, schema }: Fault, findings: Findings): void {
+  if (schema?.kind !== 'choice') return;
+  const allowed = schema.allowed.map(String);
+  const text = node.text ?? '';
+  const meant = allowed.length === 1 ? allowed[0] : nearest(text, allowed);
+  const fixes = meant === undefined ? [] : [{ title: `Change to \`${meant}\``, range: node.written, text: meant }];
+  const hint = meant === undefined || allowed.length === 1 ? '' : ` Did you mean \`${meant}\`?`;
+  const message = `${placeName(node.path)} can be ${listed(allowed)}, not \`${clip(text)}\`.${hint}`;
+  findings.add('not-allowed', node.path, node.written, message, { fixes });
+}
