@@ -3,11 +3,49 @@
  * Coefficients: E. Hairer, S. P. Nørsett and G. Wanner, Solving Ordinary Differential Equations I, 2nd ed.,
  * Springer 1993, section II.10, rounded to double precision.
  */
-import type { RightHandSide } from './dop853.ts';
 import type { Workspace } from './dop853_tableau.ts';
+import type { AcceptedStep, RightHandSide } from './integration.ts';
+
+/** The one step object handed to the observer, refilled by `show`. */
+export function createStepView(rhs: RightHandSide, w: Workspace, onDenseStages: () => void) {
+  const prepared = new Uint8Array(w.n);
+  let staged = false;
+  let h = 0;
+  const step = {
+    start: 0,
+    end: 0,
+    before: w.y,
+    after: w.next,
+    interpolate(time: number, component: number): number {
+      if (!(component >= 0 && component < w.n)) return Number.NaN;
+      if (!staged) {
+        takeDenseStages(rhs, w, step.start, h);
+        onDenseStages();
+        prepared.fill(0);
+        staged = true;
+      }
+      if (prepared[component] !== 1) {
+        prepareDense(w, h, component);
+        prepared[component] = 1;
+      }
+      return evaluateDense(w, component, (time - step.start) / h);
+    },
+    interpolateAll(time: number, into: Float64Array): void {
+      for (let i = 0; i < w.n; i++) into[i] = step.interpolate(time, i);
+    },
+  };
+  const show = (start: number, end: number, length: number): AcceptedStep => {
+    step.start = start;
+    step.end = end;
+    h = length;
+    staged = false;
+    return step;
+  };
+  return { show };
+}
 
 /** Evaluates the three further stages of the dense output; k13 must hold the derivative at the end. 3 evaluations. */
-export function takeDenseStages(rhs: RightHandSide, w: Workspace, time: number, h: number): void {
+function takeDenseStages(rhs: RightHandSide, w: Workspace, time: number, h: number): void {
   const { trial } = w;
   stage14(w, h);
   rhs(time + 0.1 * h, trial, w.k14);
@@ -18,7 +56,7 @@ export function takeDenseStages(rhs: RightHandSide, w: Workspace, time: number, 
 }
 
 /** Writes the eight dense-output coefficients of component `i`, book section II.10. */
-export function prepareDense(w: Workspace, h: number, i: number): void {
+function prepareDense(w: Workspace, h: number, i: number): void {
   const { y, next, dense, k1, k6, k7, k8, k9, k10, k11, k12, k13, k14, k15, k16 } = w;
   const difference = next[i]! - y[i]!;
   const slope = h * k1[i]! - difference;
@@ -86,7 +124,7 @@ export function prepareDense(w: Workspace, h: number, i: number): void {
 }
 
 /** Value of the dense output of component `i` at the fraction `s` of the step, 0 to 1. */
-export function evaluateDense(w: Workspace, i: number, s: number): number {
+function evaluateDense(w: Workspace, i: number, s: number): number {
   const { dense } = w;
   const base = 8 * i;
   const r = 1 - s;
@@ -96,69 +134,48 @@ export function evaluateDense(w: Workspace, i: number, s: number): number {
 
 function stage14(w: Workspace, h: number): void {
   const { n, y, k1, k7, k8, k9, k10, k11, k12, k13, trial } = w;
-  const a1 = h * 0.056167502283047954;
-  const a7 = h * 0.25350021021662483;
-  const a8 = h * -0.2462390374708025;
-  const a9 = h * -0.12419142326381637;
-  const a10 = h * 0.15329179827876568;
-  const a11 = h * 0.00820105229563469;
-  const a12 = h * 0.007567897660545699;
-  const a13 = h * -0.008298;
   for (let i = 0; i < n; i++)
     trial[i] =
       y[i]! +
-      a1 * k1[i]! +
-      a7 * k7[i]! +
-      a8 * k8[i]! +
-      a9 * k9[i]! +
-      a10 * k10[i]! +
-      a11 * k11[i]! +
-      a12 * k12[i]! +
-      a13 * k13[i]!;
+      h *
+        (0.056167502283047954 * k1[i]! +
+          0.25350021021662483 * k7[i]! -
+          0.2462390374708025 * k8[i]! -
+          0.12419142326381637 * k9[i]! +
+          0.15329179827876568 * k10[i]! +
+          0.00820105229563469 * k11[i]! +
+          0.007567897660545699 * k12[i]! -
+          0.008298 * k13[i]!);
 }
 
 function stage15(w: Workspace, h: number): void {
   const { n, y, k1, k6, k7, k8, k11, k12, k13, k14, trial } = w;
-  const a1 = h * 0.03183464816350214;
-  const a6 = h * 0.028300909672366776;
-  const a7 = h * 0.053541988307438566;
-  const a8 = h * -0.05492374857139099;
-  const a11 = h * -0.00010834732869724932;
-  const a12 = h * 0.0003825710908356584;
-  const a13 = h * -0.00034046500868740456;
-  const a14 = h * 0.1413124436746325;
   for (let i = 0; i < n; i++)
     trial[i] =
       y[i]! +
-      a1 * k1[i]! +
-      a6 * k6[i]! +
-      a7 * k7[i]! +
-      a8 * k8[i]! +
-      a11 * k11[i]! +
-      a12 * k12[i]! +
-      a13 * k13[i]! +
-      a14 * k14[i]!;
+      h *
+        (0.03183464816350214 * k1[i]! +
+          0.028300909672366776 * k6[i]! +
+          0.053541988307438566 * k7[i]! -
+          0.05492374857139099 * k8[i]! -
+          0.00010834732869724932 * k11[i]! +
+          0.0003825710908356584 * k12[i]! -
+          0.00034046500868740456 * k13[i]! +
+          0.1413124436746325 * k14[i]!);
 }
 
 function stage16(w: Workspace, h: number): void {
   const { n, y, k1, k6, k7, k8, k9, k13, k14, k15, trial } = w;
-  const a1 = h * -0.42889630158379194;
-  const a6 = h * -4.697621415361164;
-  const a7 = h * 7.683421196062599;
-  const a8 = h * 4.06898981839711;
-  const a9 = h * 0.3567271874552811;
-  const a13 = h * -0.0013990241651590145;
-  const a14 = h * 2.9475147891527724;
-  const a15 = h * -9.15095847217987;
   for (let i = 0; i < n; i++)
     trial[i] =
       y[i]! +
-      a1 * k1[i]! +
-      a6 * k6[i]! +
-      a7 * k7[i]! +
-      a8 * k8[i]! +
-      a9 * k9[i]! +
-      a13 * k13[i]! +
-      a14 * k14[i]! +
-      a15 * k15[i]!;
+      h *
+        (-0.42889630158379194 * k1[i]! -
+          4.697621415361164 * k6[i]! +
+          7.683421196062599 * k7[i]! +
+          4.06898981839711 * k8[i]! +
+          0.3567271874552811 * k9[i]! -
+          0.0013990241651590145 * k13[i]! +
+          2.9475147891527724 * k14[i]! -
+          9.15095847217987 * k15[i]!);
 }
