@@ -31,8 +31,8 @@ const bundles = [
   },
   { ...node, entryPoints: ['extension/server/main.ts'], outfile: 'dist/server.cjs' },
   { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },
-  { ...page, entryPoints: { readout: 'webview/readout.ts' }, outdir: 'dist' },
-].filter(({ entryPoints }) => Object.values(entryPoints).every((entry) => existsSync(join(root, entry))));
+  { ...page, entryPoints: ['webview/readout.ts', 'webview/readout.css'], outdir: 'dist' },
+].filter(({ entryPoints }) => entryPoints.every((entry) => existsSync(join(root, entry))));
 
 try {
   await Promise.all(bundles.map((options) => build(options)));

@@ -1,0 +1,42 @@
+import type { Diagnostic, DiagnosticSeverity } from 'vscode-languageserver-protocol';
+import type { Analysis } from '../core/analyse.ts';
+import type { Problem, Severity } from '../core/report/problem.ts';
+import type { ToRange } from './range.ts';
+
+/** LSP's numbers: 1 error, 2 warning, 3 information. */
+const severities: Readonly<Record<Severity, DiagnosticSeverity>> = { error: 1, warning: 2, information: 3 };
+
+/** Every problem of the analysis; `checksUri` is where the sections that explain the codes can be opened. */
+export function diagnostics(analysis: Analysis, toRange: ToRange, checksUri?: string): Diagnostic[] {
+  return analysis.problems.map((problem) => diagnostic(problem, toRange, checksUri));
+}
+
+export function diagnostic(problem: Problem, toRange: ToRange, checksUri?: string): Diagnostic {
+  return {
+    range: toRange(problem.range),
+    severity: severities[problem.severity],
+    source: 'Giant Pulse',
+    message: problem.message,
+    ...codeOf(problem.code, checksUri),
+  };
+}
+
+/** A fault of ours is shown on the first line: silence would look like a clean design. */
+export function internalFailure(reason: string, checksUri?: string): Diagnostic {
+  return {
+    range: { start: { line: 0, character: 0 }, end: { line: 0, character: 1 } },
+    severity: severities.error,
+    source: 'Giant Pulse',
+    message: `${failureMessage(reason)} The design has not been checked.`,
+    ...codeOf('internal-failure', checksUri),
+  };
+}
+
+export function failureMessage(reason: string): string {
+  return `Giant Pulse failed on this design (${reason}). This is a fault of the program: please report it with the file.`;
+}
+
+/** Each code is also the anchor of the section that explains it. */
+function codeOf(code: string, checksUri: string | undefined): Pick<Diagnostic, 'code' | 'codeDescription'> {
+  return checksUri === undefined ? { code } : { code, codeDescription: { href: `${checksUri}#${code}` } };
+}

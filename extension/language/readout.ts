@@ -1,0 +1,97 @@
+import { type Analysis, waveform } from '../core/analyse.ts';
+import type { Problem } from '../core/report/problem.ts';
+import type { ProblemRow, ReadoutState, WaveformChart } from '../protocol/readout.ts';
+import { titleOf } from './design-title.ts';
+import { failureMessage } from './diagnostics.ts';
+import { inDisplayUnit } from './display-units.ts';
+import { figureGroups, headlineFigures, modelName } from './figures.ts';
+import { requirementRow, surfaceRow } from './verdicts.ts';
+
+/** Enough that the curve looks smooth on a wide screen. */
+const chartPoints = 301;
+
+export interface ReadoutSubject {
+  readonly uri: string;
+  readonly version: number;
+  /** The line (from 1) of an offset of the text. */
+  lineOf(offset: number): number;
+}
+
+/** What the readout shows for one version of a design. */
+export function readout(analysis: Analysis, subject: ReadoutSubject): ReadoutState {
+  const { prediction, problems } = analysis;
+  const chart = prediction?.pulse === undefined ? undefined : waveformChart(analysis);
+  return {
+    ...shell(subject, titleOf(analysis.design) ?? fileName(subject.uri)),
+    headline: headlineFigures(prediction),
+    problems: problems.map((problem) => problemRow(problem, subject)),
+    ...(prediction === undefined
+      ? {}
+      : {
+          model: modelName(prediction),
+          groups: figureGroups(prediction),
+          surfaces: prediction.surfaces.map((surface, index) => surfaceRow(surface, index, problems)),
+          requirements: prediction.requirements.map(requirementRow),
+          validity: prediction.validity.map(({ message }) => message),
+        }),
+    ...(prediction?.pulse === undefined ? { absence: absence(problems) } : {}),
+    ...(chart === undefined ? {} : { waveform: chart }),
+  };
+}
+
+/** The same page after a fault of ours: no figure, and the reason why. */
+export function failedReadout(reason: string, subject: ReadoutSubject): ReadoutState {
+  const message = failureMessage(reason);
+  return {
+    ...shell(subject, fileName(subject.uri)),
+    absence: message,
+    problems: [{ severity: 'error', code: 'internal-failure', message, line: 1 }],
+  };
+}
+
+function shell({ uri, version }: ReadoutSubject, title: string): ReadoutState {
+  const nothing = { groups: [], surfaces: [], requirements: [], validity: [], problems: [] };
+  return { uri, version, title, headline: headlineFigures(undefined), ...nothing };
+}
+
+function fileName(uri: string): string {
+  const name = uri.slice(uri.lastIndexOf('/') + 1);
+  try {
+    return decodeURIComponent(name);
+  } catch {
+    return name;
+  }
+}
+
+function problemRow({ severity, code, message, range }: Problem, { lineOf }: ReadoutSubject): ProblemRow {
+  return { severity, code, message, line: lineOf(range.start) };
+}
+
+/** Why there is no pulse: the first errors are what must be mended. */
+function absence(problems: readonly Problem[]): string {
+  const errors = problems.filter(({ severity }) => severity === 'error');
+  const [first] = errors;
+  if (first === undefined) return 'The model predicts no pulse for this design.';
+  const more = errors.length - 1;
+  const others = more === 0 ? '' : ` (and ${more} more error${more === 1 ? '' : 's'}, below)`;
+  return `No pulse is predicted: ${first.message}${others}`;
+}
+
+function waveformChart(analysis: Analysis): WaveformChart | undefined {
+  const course = waveform(analysis, chartPoints);
+  if (course === undefined || course.time_s.length === 0) return undefined;
+  const time = inDisplayUnit(course.time_s, 's');
+  const power = inDisplayUnit(course.power_W, 'W');
+  const [energy, peak, width] = headlineFigures(analysis.prediction).map(({ value }) => value ?? 'not predicted');
+  const left = course.inversion.at(-1);
+  const remaining =
+    left === undefined ? '' : ` The gain falls to ${(left * 100).toFixed(0)} % of its value before the pulse.`;
+  return {
+    timeUnit: time.unit,
+    time: time.values,
+    powerUnit: power.unit,
+    power: power.values,
+    inversion: course.inversion.map((value) => Number(value.toFixed(5))),
+    summary: `Pulse waveform: output power rises to ${peak}, ${width} wide at half maximum, ${energy} in all.${remaining}`,
+  };
+}

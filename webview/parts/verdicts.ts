@@ -1,0 +1,55 @@
+import type { RequirementRow, SurfaceRow, Verdict } from '../../extension/protocol/readout.ts';
+import { element, table } from '../dom.ts';
+
+const absent = '—';
+const marks: Readonly<Record<Verdict, string>> = { good: '✓', look: '!', bad: '✗', unknown: '?' };
+
+type Words = Readonly<Record<Verdict, string>>;
+const surfaceWords: Words = { good: 'safe', look: 'below wanted margin', bad: 'over threshold', unknown: 'not judged' };
+const requirementWords: Words = { good: 'met', look: 'near', bad: 'missed', unknown: 'not predicted' };
+
+/** A mark and a word: the colour only repeats what they say. */
+function verdictCell(verdict: Verdict, words: Words): HTMLElement {
+  const mark = element('span', { class: 'mark', 'aria-hidden': 'true' }, marks[verdict]);
+  return element('span', { class: `verdict ${verdict}` }, mark, ` ${words[verdict]}`);
+}
+
+export function surfaceTable(rows: readonly SurfaceRow[]): HTMLElement {
+  const columns = [
+    { heading: 'Surface' },
+    { heading: 'Peak fluence', numeric: true },
+    { heading: 'Threshold', numeric: true },
+    { heading: 'Margin', numeric: true },
+    { heading: 'Verdict' },
+  ];
+  return table(
+    'Peak fluence on each surface against its damage threshold, scaled to this pulse',
+    columns,
+    rows.map(({ name, fluence, threshold, margin, verdict }) => [
+      name,
+      fluence,
+      threshold ?? absent,
+      margin ?? absent,
+      verdictCell(verdict, surfaceWords),
+    ]),
+  );
+}
+
+export function requirementTable(rows: readonly RequirementRow[]): HTMLElement {
+  const columns = [
+    { heading: 'Requirement' },
+    { heading: 'Required', numeric: true },
+    { heading: 'Predicted', numeric: true },
+    { heading: 'Verdict' },
+  ];
+  return table(
+    'Each requirement against the prediction',
+    columns,
+    rows.map(({ name, required, predicted, verdict }) => [
+      name,
+      required,
+      predicted ?? absent,
+      verdictCell(verdict, requirementWords),
+    ]),
+  );
+}

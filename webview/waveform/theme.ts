@@ -1,0 +1,40 @@
+export interface ChartTheme {
+  readonly text: string;
+  readonly grid: string;
+  readonly power: string;
+  readonly inversion: string;
+  readonly surface: string;
+  readonly border: string;
+  readonly font: string;
+  /** Thicker where the theme asks for high contrast. */
+  readonly lineWidth: number;
+}
+
+/** The editor's colours as they are now: canvas can't follow style sheets by itself. */
+export function chartTheme(): ChartTheme {
+  const style = getComputedStyle(document.body);
+  const colour = (names: readonly string[], fallback: string): string => {
+    const value = names.map((name) => style.getPropertyValue(name).trim()).find((found) => found !== '');
+    return value ?? fallback;
+  };
+  const highContrast = ['vscode-high-contrast', 'vscode-high-contrast-light'].some((name) =>
+    document.body.classList.contains(name),
+  );
+  const text = colour(['--vscode-foreground'], style.color);
+  return {
+    text,
+    grid: colour(highContrast ? ['--vscode-contrastBorder'] : ['--vscode-editorIndentGuide-background1'], text),
+    power: highContrast ? text : colour(['--vscode-charts-blue'], text),
+    inversion: colour(['--vscode-charts-orange'], text),
+    surface: colour(['--vscode-editorHoverWidget-background', '--vscode-editor-background'], 'Canvas'),
+    border: colour(['--vscode-contrastBorder', '--vscode-editorHoverWidget-border'], text),
+    font: colour(['--vscode-font-family'], 'sans-serif'),
+    lineWidth: highContrast ? 2.5 : 1.75,
+  };
+}
+
+/** Calls back whenever VS Code changes the theme of the page. */
+export function onThemeChange(changed: () => void): void {
+  const observer = new MutationObserver(changed);
+  observer.observe(document.body, { attributes: true, attributeFilter: ['class', 'data-vscode-theme-id'] });
+}
