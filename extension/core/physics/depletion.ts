@@ -143,6 +143,37 @@ export function timeTo(depletion: Depletion, x: number): number {
   return Math.log1p((rise * x) / start) / rise + (rest * x) / 2;
 }
 
+/** Time from the peak until the field has fallen to a fraction of it, in units of t_r. */
+export function timeFromPeak(depletion: Depletion, pulse: DepletionPulse, fraction: number): number {
+  const course: Course = { gain: Number.NaN, field: Number.NaN, slope: Number.NaN };
+  const to = fieldReaches(depletion, fraction * pulse.peak, pulse.endsAt, course);
+  return timeBetween(depletion, pulse.peakAt, to, pulse.endsAt, course);
+}
+
+/** Depletions and times (units of t_r, zero at the peak) at `points` places between two equal fractions of the peak. */
+export function timesBetween(
+  depletion: Depletion,
+  pulse: DepletionPulse,
+  fraction: number,
+  points: number,
+): { readonly x: number; readonly time: number }[] {
+  const { peakAt, peak, endsAt } = pulse;
+  const course: Course = { gain: Number.NaN, field: Number.NaN, slope: Number.NaN };
+  const level = Math.max(fraction * peak, 2 * depletion.start);
+  const rise = smallSignalGain(depletion.gain) - depletion.loss;
+  const from = fieldReaches(depletion, level, (level - depletion.start) / rise, course);
+  const to = fieldReaches(depletion, level, endsAt, course);
+  const low = Math.log(from / (endsAt - from));
+  const step = (Math.log(to / (endsAt - to)) - low) / (points - 1);
+  const places = Array.from({ length: points }, (_, i) => endsAt / (1 + Math.exp(-(low + i * step))));
+  const before = timeBetween(depletion, from, peakAt, endsAt, course);
+  let time = -before;
+  return places.map((x, i) => {
+    if (i > 0) time += timeBetween(depletion, places[i - 1]!, x, endsAt, course);
+    return { x, time };
+  });
+}
+
 function follow(depletion: Depletion, x: number, course: Course): void {
   const { gain, intensity } = depletion;
   let g = 0;

@@ -30,6 +30,8 @@ export interface GainMedium {
   readonly upperLevelLifetime: number;
   /** s; present only where the design itself gives it. */
   readonly lowerLevelLifetime?: number;
+  /** κ = γ − 1 for a lower level that never empties: f_l/f_u; needed beside the lifetime. */
+  readonly lowerLevelWeight?: number;
   /** γ, 1 to 2. */
   readonly inversionReductionFactor: number;
   readonly refractiveIndex: number;
@@ -79,6 +81,8 @@ export interface QSwitch {
 
 export interface Surface {
   readonly name: string;
+  /** Where the design names it. */
+  readonly path: string;
   readonly place: 'inside' | 'outside';
   readonly face: 'transmitting' | 'reflecting';
   /** m. */

@@ -60,12 +60,14 @@ export interface SurfaceFigures {
 }
 
 export interface RequirementFigures {
-  /** Key under `requirements`, with ` min` or ` max` behind it: `pulse_energy min`. */
+  /** Key under `requirements`, e.g. `pulse_energy`. */
   readonly name: string;
-  /** Absent where the model doesn't predict the figure. */
+  /** Absent where the figure is not predicted. */
   readonly met?: boolean;
-  readonly required: number;
+  /** SI, as are the wanted limits. */
   readonly predicted?: number;
+  readonly minimum?: number;
+  readonly maximum?: number;
 }
 
 export interface ValidityNote {

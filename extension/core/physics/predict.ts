@@ -1,0 +1,81 @@
+import { type Cavity, cavityOf, roundTripGain } from './cavity.ts';
+import { optimumCoupling } from './coupling.ts';
+import { surfaceFigures } from './damage.ts';
+import type { GainModule } from './gain-module.ts';
+import type { Prediction, PulseFigures, StateFigures, TrainFigures } from './prediction.ts';
+import { judgeRequirements, type Requirement } from './requirements.ts';
+import { type Train, trainOf } from './train.ts';
+
+/** A prediction and what it was worked out from. */
+export interface Outcome {
+  readonly figures: Omit<Prediction, 'validity'>;
+  readonly cavity: Cavity;
+  readonly train: Train;
+  /** (δ + δ_closed)/G just before opening; absent where no closed loss is given. */
+  readonly holdOffMargin?: number;
+}
+
+/**
+ * Predicts an actively switched module: the settled pulse, its train, the best coupling, surfaces and requirements.
+ * Undefined for a passive or absent switch, which this release does not model. Conventions: `physics.md`.
+ */
+export function predict(module: GainModule, requirements: readonly Requirement[]): Outcome | undefined {
+  if (module.qSwitch.kind === 'saturable_absorber' || module.qSwitch.kind === 'none') return undefined;
+  const cavity = cavityOf(module);
+  const train = trainOf(cavity);
+  const pulse = pulseFigures(train);
+  const trainFigures = figuresOfTrain(module, train);
+  const gain = roundTripGain(cavity, train.store.ions);
+  const margin = (cavity.loss + cavity.closedLog) / gain;
+  const holdOff = Number.isFinite(margin) && gain > 0 ? { holdOffMargin: margin } : {};
+  return {
+    figures: {
+      model: train.settled?.model ?? 'depletion',
+      ...(pulse && { pulse }),
+      state: stateFigures(cavity, train, gain),
+      train: trainFigures,
+      coupling: optimumCoupling(cavity, train.balance),
+      surfaces: pulse
+        ? module.surfaces.map((surface) => surfaceFigures(module, surface, pulse.energy_J, pulse.width_fwhm_s))
+        : [],
+      requirements: judgeRequirements(requirements, { ...(pulse && { pulse }), train: trainFigures, ...holdOff }),
+    },
+    cavity,
+    train,
+    ...holdOff,
+  };
+}
+
+function pulseFigures({ settled }: Train): PulseFigures | undefined {
+  return (
+    settled && {
+      energy_J: settled.energy,
+      peak_power_W: settled.peakPower,
+      width_fwhm_s: settled.width,
+      width_equivalent_s: settled.energy / settled.peakPower,
+      ...(settled.buildUp !== undefined && { build_up_time_s: settled.buildUp }),
+    }
+  );
+}
+
+function stateFigures(cavity: Cavity, { store, settled }: Train, gain: number): StateFigures {
+  const stored = cavity.photon * store.total;
+  return {
+    round_trip_gain_log: gain,
+    round_trip_loss_log: cavity.loss,
+    inversion_ratio: gain / cavity.loss,
+    stored_energy_J: stored,
+    ...(settled && stored > 0 && { extraction_efficiency: settled.energy / stored }),
+  };
+}
+
+function figuresOfTrain(module: GainModule, train: Train): TrainFigures {
+  const rate = module.qSwitch.repetitionRate;
+  const { settled, first, afterPause, meanEnergy } = train;
+  return {
+    repetition_rate_Hz: rate,
+    ...(settled && { average_power_W: meanEnergy * rate }),
+    ...(first && { first_pulse_energy_J: first.energy }),
+    ...(afterPause && { pulse_after_pause_energy_J: afterPause.energy }),
+  };
+}

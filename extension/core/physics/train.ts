@@ -1,0 +1,97 @@
+import { type Balance, balancedDepletion, balanceOf, singleShot } from './balance.ts';
+import { type Cavity, roundTripGain } from './cavity.ts';
+import { type Firing, fire } from './fire.ts';
+import { blend, emptyStore, refill, type Schedule, type Store, scheduleOf } from './store.ts';
+
+/** What a module does opening after opening, from a cold start on. */
+export interface Train {
+  /** Just before the settled pulse; where none fires, what the closed and reopened switch holds for good. */
+  readonly store: Store;
+  readonly settled?: Firing;
+  readonly first?: Firing;
+  readonly afterPause?: Firing;
+  /** Mean energy per opening once settled, J. */
+  readonly meanEnergy: number;
+  /** Openings fail or pulses alternate instead of settling; `settled` is then the largest pulse met. */
+  readonly unsettled: boolean;
+  /** What the optimum coupling is judged by: the store given for a pulsed pump, the balance for a continuous one. */
+  readonly balance: Balance;
+}
+
+/** Openings followed before a train is called unsettled, and the last of them that its mean is taken over. */
+const MOST_OPENINGS = 240;
+const MEAN_OVER = 64;
+/** Relative change of gain from opening to opening at which a train is settled. */
+const SETTLED = 1e-11;
+/** After so many openings in a row that came closer to balance, the train is taken to reach it. */
+const APPROACHES = 8;
+
+/** Follows openings until they repeat. An opening that fails carries its inversion over. */
+export function trainOf(cavity: Cavity): Train {
+  const { qSwitch, medium, pump } = cavity.module;
+  const schedule = scheduleOf(cavity);
+  const limit = cavity.loss + cavity.closedLog;
+  const lost = -Math.expm1(-1 / (qSwitch.repetitionRate * medium.upperLevelLifetime));
+  const start = { ...schedule, idle: 0 };
+  const balance = balanceOf(cavity, refill(cavity, emptyStore(cavity), start), lost);
+  const run = follow(cavity, schedule, limit, lost, balance);
+  const afterPause =
+    pump.kind === 'continuous'
+      ? fire(cavity, refill(cavity, emptyStore(cavity), { idle: 0, pumped: Number.POSITIVE_INFINITY, wait: 0 }, limit))
+      : undefined;
+  return {
+    ...run,
+    ...(afterPause && { afterPause }),
+    balance: pump.kind === 'continuous' ? balance : singleShot(cavity, run.store),
+  };
+}
+
+function follow(cavity: Cavity, schedule: Schedule, limit: number, lost: number, balance: Balance) {
+  const idle = balance.store(0);
+  const depletion = balancedDepletion(balance, cavity.loss);
+  const target = depletion === undefined ? undefined : balance.store(depletion);
+  const reachable = target && roundTripGain(cavity, target.ions) < limit ? target : undefined;
+  const goal = reachable ? roundTripGain(cavity, reachable.ions) : Number.NaN;
+  const energies: number[] = [];
+  let store = refill(cavity, emptyStore(cavity), { ...schedule, idle: 0 }, limit);
+  let first: Firing | undefined;
+  let largest: { readonly store: Store; readonly settled: Firing } | undefined;
+  let approaches = 0;
+  for (let opening = 0; opening < MOST_OPENINGS; opening++) {
+    if (!(roundTripGain(cavity, store.ions) > cavity.loss)) {
+      const waited = untilThreshold(cavity, store, idle, lost);
+      if (waited === undefined) return { store: idle, ...ended(first, undefined, 0, false) };
+      store = waited;
+    }
+    const fired = fire(cavity, store);
+    first ??= fired;
+    if (fired && fired.energy >= (largest?.settled.energy ?? 0)) largest = { store, settled: fired };
+    energies.push(fired?.energy ?? 0);
+    const next = refill(cavity, fired?.after ?? store, schedule, limit);
+    const gain = roundTripGain(cavity, store.ions);
+    const nextGain = roundTripGain(cavity, next.ions);
+    if (Math.abs(nextGain - gain) <= SETTLED * gain)
+      return { store, ...ended(first, fired, fired?.energy ?? 0, false) };
+    approaches = fired && Math.abs(nextGain - goal) < Math.abs(gain - goal) ? approaches + 1 : 0;
+    const settled =
+      reachable && approaches >= APPROACHES && fired?.model === 'depletion' ? fire(cavity, reachable) : undefined;
+    if (reachable && settled) return { store: reachable, ...ended(first, settled, settled.energy, false) };
+    store = next;
+  }
+  const tail = energies.slice(-MEAN_OVER);
+  const mean = tail.reduce((sum, energy) => sum + energy, 0) / tail.length;
+  return { store: largest?.store ?? store, ...ended(first, largest?.settled, mean, true) };
+}
+
+function ended(first: Firing | undefined, settled: Firing | undefined, meanEnergy: number, unsettled: boolean) {
+  return { ...(first && { first }), ...(settled && { settled }), meanEnergy, unsettled };
+}
+
+/** The store at the first opening whose gain exceeds the loss, none firing before; undefined if that never comes. */
+function untilThreshold(cavity: Cavity, store: Store, idle: Store, lost: number): Store | undefined {
+  const ceiling = roundTripGain(cavity, idle.ions);
+  const gain = roundTripGain(cavity, store.ions);
+  if (!(ceiling > cavity.loss)) return undefined;
+  const openings = Math.floor(Math.log((ceiling - cavity.loss) / (ceiling - gain)) / Math.log1p(-lost)) + 1;
+  return blend(store, idle, -Math.expm1(openings * Math.log1p(-lost)));
+}
