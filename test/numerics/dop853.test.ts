@@ -65,6 +65,23 @@ describe('closed forms', () => {
     expect(Math.abs(result.state[0]! - Math.sin(4))).toBeLessThan(1e-12);
   });
 
+  test('every stage stands at its own time: y′ = 1 from y = t', () => {
+    let worst = 0;
+    let calls = 0;
+    const clock: RightHandSide = (time, y, out) => {
+      worst = Math.max(worst, Math.abs(y[0]! - time));
+      calls++;
+      out[0] = 1;
+    };
+    const result = integrate(clock, 0, Float64Array.of(0), 3, fixedSteps(8), (step) => {
+      step.interpolate(step.end, 0);
+      return false;
+    });
+    expect(worst).toBeLessThan(1e-14);
+    expect(calls).toBe(result.evaluations);
+    expect(calls).toBe(1 + 6 * (12 + 3));
+  });
+
   test('backwards from the end returns to the start', () => {
     const there = integrate(oscillator, 0, Float64Array.of(1, 0), 7, tight);
     const back = integrate(oscillator, 7, there.state, 0, tight);
