@@ -57,6 +57,7 @@ describe('dense output', () => {
     integrate(growth, 0, one, 1, usual, (step) => {
       expect(step.interpolate(step.end, 1)).toBeNaN();
       expect(step.interpolate(step.end, -1)).toBeNaN();
+      expect(step.interpolate(step.end, 0.5)).toBeNaN();
       return false;
     });
   });

@@ -17,7 +17,7 @@ export function createStepView(rhs: RightHandSide, w: Workspace, onDenseStages: 
     before: w.y,
     after: w.next,
     interpolate(time: number, component: number): number {
-      if (!(component >= 0 && component < w.n)) return Number.NaN;
+      if (prepared[component] === undefined) return Number.NaN;
       if (!staged) {
         takeDenseStages(rhs, w, step.start, h);
         onDenseStages();

@@ -3,13 +3,13 @@
  * Coefficients: E. Hairer, S. P. Nørsett and G. Wanner, Solving Ordinary Differential Equations I, 2nd ed.,
  * Springer 1993, sections II.5 and II.10 (the method DOP853), rounded to double precision.
  *
- * Each stage is one loop of its own with its coefficients as literals, over one array with row offsets: a table
- * walked by index, or an array object a row, was measured to be slower.
+ * Each stage is one loop of its own with its coefficients as literals, over one array with row offsets, which was
+ * measured to be a tenth faster than an array object a row.
  */
 import type { RightHandSide } from './integration.ts';
 
 /** First index of each row of the pool; k1 to k16 are the stage derivatives of the book, and y is row 0. */
-export interface Rows {
+interface Rows {
   readonly next: number;
   readonly trial: number;
   readonly tolerance: number;

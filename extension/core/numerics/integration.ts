@@ -24,7 +24,10 @@ export interface AcceptedStep {
   readonly end: number;
   readonly before: Float64Array;
   readonly after: Float64Array;
-  /** Dense output of one component at a time within the step; the three extra stages are evaluated on first use only. */
+  /**
+   * Dense output of one component at a time within the step, NaN for a component that does not exist; the three extra
+   * stages are evaluated on first use only.
+   */
   interpolate(time: number, component: number): number;
   /** Dense output of all components at a time within the step. */
   interpolateAll(time: number, into: Float64Array): void;
