@@ -16,7 +16,7 @@ export type {
   StepObserver,
 } from './integration.ts';
 
-/** Share taken of the step that would just meet the tolerance: of 0.75 to 0.98, 0.85 took about the fewest evaluations over pulses and orbits. */
+/** Share taken of the step that would just meet the tolerance; over pulses and orbits 0.85 took about the fewest calls. */
 const safety = 0.85;
 
 /**
