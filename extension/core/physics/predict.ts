@@ -26,7 +26,7 @@ export function predict(module: GainModule, requirements: readonly Requirement[]
   const pulse = pulseFigures(train);
   const trainFigures = figuresOfTrain(module, train);
   const gain = roundTripGain(cavity, train.store.ions);
-  const margin = (cavity.loss + cavity.closedLog) / gain;
+  const margin = (cavity.loss + cavity.closedLog) / (train.unheldGain ?? gain);
   const holdOff = Number.isFinite(margin) && gain > 0 ? { holdOffMargin: margin } : {};
   return {
     figures: {

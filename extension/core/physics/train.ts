@@ -12,6 +12,8 @@ export interface Train {
   readonly afterPause?: Firing;
   /** Mean energy per opening once settled, J. */
   readonly meanEnergy: number;
+  /** The gain that filling would have reached, had the closed switch held it; absent where it did hold. */
+  readonly unheldGain?: number;
   /** Openings fail or pulses alternate instead of settling; `settled` is then the largest pulse met. */
   readonly unsettled: boolean;
   /** What the optimum coupling is judged by: the store given for a pulsed pump, the balance for a continuous one. */
@@ -34,7 +36,13 @@ export function trainOf(cavity: Cavity): Train {
   const lost = -Math.expm1(-1 / (qSwitch.repetitionRate * medium.upperLevelLifetime));
   const start = { ...schedule, idle: 0 };
   const balance = balanceOf(cavity, refill(cavity, emptyStore(cavity), start), lost);
-  const run = follow(cavity, schedule, limit, lost, balance);
+  let unheldGain = 0;
+  const fill = (left: Store, over: Schedule) => {
+    const store = refill(cavity, left, over, limit);
+    if (store.overfilled) unheldGain = Math.max(unheldGain, roundTripGain(cavity, refill(cavity, left, over).ions));
+    return store;
+  };
+  const run = follow(cavity, schedule, fill, limit, lost, balance);
   const afterPause =
     pump.kind === 'continuous'
       ? fire(cavity, refill(cavity, emptyStore(cavity), { idle: 0, pumped: Number.POSITIVE_INFINITY, wait: 0 }, limit))
@@ -42,18 +50,26 @@ export function trainOf(cavity: Cavity): Train {
   return {
     ...run,
     ...(afterPause && { afterPause }),
+    ...(unheldGain > 0 && { unheldGain }),
     balance: pump.kind === 'continuous' ? balance : singleShot(cavity, run.store),
   };
 }
 
-function follow(cavity: Cavity, schedule: Schedule, limit: number, lost: number, balance: Balance) {
+function follow(
+  cavity: Cavity,
+  schedule: Schedule,
+  fill: (left: Store, over: Schedule) => Store,
+  limit: number,
+  lost: number,
+  balance: Balance,
+) {
   const idle = balance.store(0);
   const depletion = balancedDepletion(balance, cavity.loss);
   const target = depletion === undefined ? undefined : balance.store(depletion);
   const reachable = target && roundTripGain(cavity, target.ions) < limit ? target : undefined;
   const goal = reachable ? roundTripGain(cavity, reachable.ions) : Number.NaN;
   const energies: number[] = [];
-  let store = refill(cavity, emptyStore(cavity), { ...schedule, idle: 0 }, limit);
+  let store = fill(emptyStore(cavity), { ...schedule, idle: 0 });
   let first: Firing | undefined;
   let largest: { readonly store: Store; readonly settled: Firing } | undefined;
   let approaches = 0;
@@ -67,7 +83,7 @@ function follow(cavity: Cavity, schedule: Schedule, limit: number, lost: number,
     first ??= fired;
     if (fired && fired.energy >= (largest?.settled.energy ?? 0)) largest = { store, settled: fired };
     energies.push(fired?.energy ?? 0);
-    const next = refill(cavity, fired?.after ?? store, schedule, limit);
+    const next = fill(fired?.after ?? store, schedule);
     const gain = roundTripGain(cavity, store.ions);
     const nextGain = roundTripGain(cavity, next.ions);
     if (Math.abs(nextGain - gain) <= SETTLED * gain)

@@ -1,0 +1,17 @@
+import type { Check } from './check.ts';
+import { fluenceFinding } from './fluence.ts';
+
+/** A surface keeps less margin than the design wants. */
+export const fluenceNearThreshold: Check = {
+  code: 'fluence-near-threshold',
+  title: 'A surface keeps less than the wanted safety factor',
+  run: (context) =>
+    fluenceFinding(context, ({ margin, hotSpot, threshold, fluence, surface }) =>
+      margin >= 1 && margin < surface.safetyFactor
+        ? {
+            severity: 'warning',
+            message: `Margin ${margin.toPrecision(3)}, wanted ${surface.safetyFactor.toPrecision(3)}: peak fluence ${fluence}${hotSpot} against a threshold of ${threshold} at this pulse width.`,
+          }
+        : undefined,
+    ),
+};

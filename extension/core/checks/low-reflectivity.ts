@@ -1,0 +1,21 @@
+import type { Check } from './check.ts';
+
+/** Below this the uniform-loss convention drifts from reality. Source: `physics.md`; Degnan 1989 assumes small loss per pass. */
+const LOWEST_REFLECTIVITY = 0.3;
+
+/** A coupler so open that gain and field vary along the resonator. */
+export const lowReflectivity: Check = {
+  code: 'low-reflectivity',
+  title: 'The output reflectivity is low for the uniform-loss model',
+  run: ({ module: { resonator } }) =>
+    resonator.outputReflectivity >= LOWEST_REFLECTIVITY
+      ? []
+      : [
+          {
+            severity: 'information',
+            message:
+              'The model spreads the output loss evenly along the resonator. Below about 30 % reflectivity energy and width drift from what a travelling wave gives.',
+            path: 'resonator.output_reflectivity',
+          },
+        ],
+};
