@@ -55,7 +55,10 @@ function quantity(node, path, readQuantity) {
   };
   const limits = Object.entries(LIMITS)
     .filter(([keyword]) => node[keyword] !== undefined)
-    .map(([keyword, name]) => ({ bound: name, ...bound(node[keyword]) }));
+    .map(([keyword, name]) => ({ bound: name, ...bound(node[keyword]), ...reason(node['x-why']?.[keyword.slice(2)]) }));
+  for (const key of Object.keys(node['x-why'] ?? {})) {
+    if (node[`x-${key}`] === undefined) throw new Error(`${path}: x-why explains ${key}, which sets no limit`);
+  }
   // An upper limit on every quantity is what keeps the arithmetic behind it finite.
   if (!limits.some((limit) => limit.bound === 'below' || limit.bound === 'at most')) {
     throw new Error(`${path}: no upper limit`);
@@ -65,9 +68,12 @@ function quantity(node, path, readQuantity) {
   return {
     dimension,
     limits,
-    ...(node['x-why'] === undefined ? {} : { why: node['x-why'] }),
-    ...(low === undefined ? {} : { usual: { low: bound(low), high: bound(high) } }),
+    ...(low === undefined ? {} : { usual: { low: bound(low), high: bound(high), ...reason(node['x-unusual']) } }),
   };
+}
+
+function reason(why) {
+  return why === undefined ? {} : { why };
 }
 
 /** Where a rule stands under `if`, the key that the `if` looks at is the one to blame. */

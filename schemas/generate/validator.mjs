@@ -12,6 +12,7 @@ export const OWN_KEYWORDS = [
   'x-below',
   'x-at-most',
   'x-usual',
+  'x-unusual',
   'x-default',
   'x-why',
   'x-because',
@@ -24,6 +25,7 @@ export const AJV_OPTIONS = {
   allowUnionTypes: true,
   strictTypes: false,
   strictRequired: false,
+  inlineRefs: false,
 };
 
 const DECLARATION = `/** One rule that a value breaks. */

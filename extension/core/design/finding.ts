@@ -4,6 +4,8 @@ import type { ReadingCode } from './codes.ts';
 /** Collects problems up to a bound, so that noise neither floods the reader nor costs more than it tells. */
 export interface Findings {
   add(code: string, path: string, range: TextRange, message: string, more?: FindingDetail): void;
+  /** From now on nothing that begins in this range is added; ranges come in the order of the text. */
+  mute(range: TextRange): void;
   /** In the order of the text, at most `limit` and one note. */
   list(): readonly Problem[];
 }
@@ -17,13 +19,14 @@ export interface FindingDetail {
 export const MAX_PROBLEMS = 100;
 
 export function createFindings(): Findings {
+  const muted: TextRange[] = [];
   const kept = new Map<string, Problem>();
   let dropped = 0;
   return {
     add(code, path, range, message, more) {
       // An anchor used in three places is wrong once.
       const identity = `${code} ${range.start} ${range.end} ${message}`;
-      if (kept.has(identity)) return;
+      if (kept.has(identity) || isWithin(muted, range.start)) return;
       if (kept.size >= MAX_PROBLEMS) {
         dropped++;
         return;
@@ -31,6 +34,9 @@ export function createFindings(): Findings {
       const severity = more?.severity ?? 'error';
       const fixes = more?.fixes;
       kept.set(identity, { code, severity, message, path, range, ...(fixes?.length ? { fixes } : {}) });
+    },
+    mute(range) {
+      muted.push(range);
     },
     list() {
       const problems = [...kept.values()].sort((a, b) => a.range.start - b.range.start || a.range.end - b.range.end);
@@ -41,4 +47,15 @@ export function createFindings(): Findings {
       return [...problems, { code, severity: 'information', message, path: '', range: last.range }];
     },
   };
+}
+
+function isWithin(ranges: readonly TextRange[], offset: number): boolean {
+  let low = 0;
+  let high = ranges.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (ranges[middle]!.end <= offset) low = middle + 1;
+    else high = middle;
+  }
+  return low < ranges.length && ranges[low]!.start <= offset;
 }

@@ -26,6 +26,13 @@ export function tighten(text: string, from: number, to: number): TextRange {
   return { start, end: Math.min(end, text.length) };
 }
 
+/** From the next character that is neither blank nor break to the end of its line, or the last word of the text. */
+export function nextWord(text: string, from: number): TextRange {
+  let start = Math.max(0, from);
+  while (start < text.length && (isBreak(text, start) || isBlank(text, start))) start++;
+  return start < text.length ? lineAt(text, start) : tighten(text, from, from + 1);
+}
+
 function isBreak(text: string, at: number): boolean {
   const code = text.charCodeAt(at);
   return code === 10 || code === 13;

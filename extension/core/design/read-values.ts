@@ -55,7 +55,7 @@ function readOne(node: TreeNode, schema: QuantitySchema, findings: Findings): Qu
   const { quantity } = read;
   const broken = schema.limits.find((limit) => !within(quantity.value, limit));
   if (broken !== undefined) {
-    const because = schema.why === undefined ? '' : `: ${schema.why}`;
+    const because = broken.why === undefined ? '' : `: ${broken.why}`;
     const message = `${placeName(node.path)} is ${clip(text)}; it must be ${broken.bound} ${broken.text}${because}.`;
     findings.add('out-of-range', node.path, node.written, message);
     return undefined;
@@ -68,7 +68,9 @@ function readOne(node: TreeNode, schema: QuantitySchema, findings: Findings): Qu
   }
   const { usual } = schema;
   if (usual !== undefined && (quantity.value < usual.low.value || quantity.value > usual.high.value)) {
-    const message = `${placeName(node.path)} is ${clip(text)}; usual is ${usual.low.text} to ${usual.high.text}. Is it meant?`;
+    const why = usual.why === undefined ? '' : `: ${usual.why}`;
+    const range = `${usual.low.text} to ${usual.high.text}`;
+    const message = `${placeName(node.path)} is ${clip(text)}; usual is ${range}${why}. Is it meant?`;
     findings.add('unusual-value', node.path, node.written, message, { severity: 'warning' });
   }
   return quantity;

@@ -38,10 +38,9 @@ export interface ReadDesign {
 /** Reads a design file. Whatever the text, the result is a value: what is wrong is among its problems. */
 export function readDesign(text: string): ReadDesign {
   const findings = createFindings();
-  const document = parseYaml(text, findings);
-  const partial = findings.list().length > 0;
-  const root = document && buildTree(text, document, findings);
-  const values = root === undefined ? {} : readRoot(root, partial, findings);
+  const parsed = parseYaml(text, findings);
+  const root = parsed && buildTree(text, parsed.document, findings);
+  const values = root === undefined ? {} : readRoot(root, parsed?.partial ?? false, findings);
   let index: ReadonlyMap<string, TreeNode> | undefined;
   const find = (path: string): TreeNode | undefined => {
     index ??= indexByPath(root);

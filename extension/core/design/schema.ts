@@ -32,9 +32,7 @@ export interface QuantitySchema extends Described {
   readonly kind: 'quantity';
   readonly dimension: DimensionName;
   readonly limits: readonly Limit[];
-  /** Why the limits are where they are, as the end of a sentence. */
-  readonly why?: string;
-  readonly usual?: { readonly low: Bound; readonly high: Bound };
+  readonly usual?: { readonly low: Bound; readonly high: Bound; readonly why?: string };
 }
 
 export interface ChoiceSchema extends Described {
@@ -60,6 +58,8 @@ export interface Bound {
 
 export interface Limit extends Bound {
   readonly bound: 'above' | 'at least' | 'below' | 'at most';
+  /** The end of a sentence; absent where the limit only keeps slips of the pen out. */
+  readonly why?: string;
 }
 
 /** A rule that holds because another key says so, by the path of its `x-because` in the schema. */

@@ -12,6 +12,8 @@ interface Fault {
   readonly error: ValidationError;
   readonly node: TreeNode;
   readonly schema: SchemaNode | undefined;
+  /** Whether its section can't do without it. */
+  readonly required: boolean;
 }
 
 /**
@@ -37,12 +39,14 @@ export function checkStructure(root: TreeNode, schema: SchemaNode, partial: bool
 function locate(error: ValidationError, root: TreeNode, schema: SchemaNode): Fault[] {
   let node: TreeNode | undefined = root;
   let part: SchemaNode | undefined = schema;
+  let required = true;
   for (const token of error.instancePath.split('/').slice(1)) {
     const key = token.replaceAll('~1', '/').replaceAll('~0', '~');
     node = node?.items?.[Number(key)] ?? node?.entries?.get(key);
+    required = part?.kind === 'section' && part.required.includes(key);
     part = part?.kind === 'list' ? part.item : keySchema(part, key);
   }
-  return node === undefined ? [] : [{ error, node, schema: part }];
+  return node === undefined ? [] : [{ error, node, schema: part, required }];
 }
 
 function report(fault: Fault, partial: boolean, misspelt: ReadonlySet<string>, findings: Findings): void {
@@ -116,11 +120,11 @@ function reportCount({ node, schema }: Fault, findings: Findings): void {
   findings.add('out-of-range', node.path, node.written, message);
 }
 
-function reportType({ node, schema }: Fault, findings: Findings): void {
+function reportType({ node, schema, required }: Fault, findings: Findings): void {
   if (schema === undefined) return;
   const code = node.kind === 'null' ? 'missing-value' : 'wrong-type';
   const where = node.kind === 'scalar' ? node.written : node.value;
-  findings.add(code, node.path, where, describeWrongType(node, schema));
+  findings.add(code, node.path, where, describeWrongType(node, schema, required));
 }
 
 function reportChoice({ node, schema }: Fault, findings: Findings): void {

@@ -7,7 +7,7 @@ export interface TreeNode {
   /** `broken`: something stands here that can't be followed, and a problem already says so. */
   readonly kind: 'map' | 'list' | 'scalar' | 'null' | 'broken';
   /** The key in front of it; absent in lists and at the root. */
-  readonly key?: TextRange;
+  readonly key: TextRange | undefined;
   /** What to underline: the value's characters, or the key (a first line where there is none) of what spans lines. */
   readonly value: TextRange;
   /** Everything from the key to the last character. */
@@ -17,12 +17,12 @@ export interface TreeNode {
   /** Taken from another section by a merge: key and value stand elsewhere in the text. */
   readonly merged: boolean;
   /** A scalar's text, without its quotes. */
-  readonly text?: string;
+  readonly text: string | undefined;
   /** Offset of `text` in the file where the two agree character by character. */
-  readonly textStart?: number;
-  readonly entries?: ReadonlyMap<string, TreeNode>;
-  readonly items?: readonly TreeNode[];
-  /** What a validator sees: strings, numbers, booleans, null, arrays and prototype-less objects. */
+  readonly textStart: number | undefined;
+  readonly entries: ReadonlyMap<string, TreeNode> | undefined;
+  readonly items: readonly TreeNode[] | undefined;
+  /** What a validator sees: strings, numbers, booleans, null, arrays and objects. */
   readonly data: unknown;
 }
 

@@ -16,7 +16,7 @@ export function reportUnknownKey(
   if (child?.key === undefined || schema?.kind !== 'section') return undefined;
   const known = Object.keys(schema.keys);
   const free = known.filter((key) => !node.entries?.has(key));
-  const what = `\`${clip(name)}\` is not a key of ${placeName(node.path)}`;
+  const what = `\`${clip(name)}\` is not a key of ${node.path === '' ? 'a design' : placeName(node.path)}`;
   const meant = nearest(name, free);
   if (meant !== undefined) {
     const fixes = [{ title: `Change to \`${meant}\``, range: child.key, text: meant }];

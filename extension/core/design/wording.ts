@@ -12,7 +12,7 @@ export function clip(text: string): string {
 
 /** A place by its path, as a message names it. */
 export function placeName(path: string): string {
-  return path === '' ? 'a design' : `\`${clip(path)}\``;
+  return path === '' ? 'The design' : `\`${clip(path)}\``;
 }
 
 export function listed(words: readonly string[], conjunction: 'and' | 'or' = 'or'): string {
@@ -27,9 +27,10 @@ export function exampleOf(key: string, schema: SchemaNode | undefined): string {
 }
 
 /** What a value that is missing or of the wrong kind should have been. */
-export function describeWrongType(node: TreeNode, schema: SchemaNode): string {
+export function describeWrongType(node: TreeNode, schema: SchemaNode, required: boolean): string {
   const name = placeName(node.path);
-  if (node.kind === 'null') return `${name} has no value. Give ${wanted(schema)}, or remove the key.`;
+  if (node.kind === 'null')
+    return `${name} has no value. Give ${wanted(schema)}${required ? '' : ', or remove the key'}.`;
   const found = node.kind === 'map' ? 'a section' : node.kind === 'list' ? 'a list' : `\`${clip(node.text ?? '')}\``;
   return `${name} takes ${wanted(schema)}, not ${found}.`;
 }

@@ -324,7 +324,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at least",
        "text": "1",
-       "value": 1
+       "value": 1,
+       "why": "each photon takes at least one unit of inversion"
       },
       {
        "bound": "at most",
@@ -332,7 +333,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 5
       }
      ],
-     "why": "each photon takes at least one unit of inversion",
      "usual": {
       "low": {
        "text": "1",
@@ -356,7 +356,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at least",
        "text": "1",
-       "value": 1
+       "value": 1,
+       "why": "light in the medium is no faster than in vacuum"
       },
       {
        "bound": "at most",
@@ -364,7 +365,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 5
       }
      ],
-     "why": "light in the medium is no faster than in vacuum",
      "usual": {
       "low": {
        "text": "1.3",
@@ -388,7 +388,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at least",
        "text": "1",
-       "value": 1
+       "value": 1,
+       "why": "a pulse in the medium is no faster than in vacuum"
       },
       {
        "bound": "at most",
@@ -396,7 +397,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 10
       }
      ],
-     "why": "a pulse in the medium is no faster than in vacuum",
      "usual": {
       "low": {
        "text": "1.3",
@@ -472,7 +472,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0 W",
-       "value": 0
+       "value": 0,
+       "why": "without a pump there is no inversion and no pulse"
       },
       {
        "bound": "at least",
@@ -485,7 +486,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 1000000000
       }
      ],
-     "why": "without a pump there is no inversion and no pulse",
      "usual": {
       "low": {
        "text": "1 mW",
@@ -622,7 +622,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         {
          "bound": "above",
          "text": "0 %",
-         "value": 0
+         "value": 0,
+         "why": "without pump light there is no inversion and no pulse"
         },
         {
          "bound": "at least",
@@ -632,10 +633,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         {
          "bound": "at most",
          "text": "100 %",
-         "value": 1
+         "value": 1,
+         "why": "optics pass no more than all of the light"
         }
        ],
-       "why": "optics pass between nothing and all of the light",
        "usual": {
         "low": {
          "text": "20 %",
@@ -707,7 +708,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0 %",
-       "value": 0
+       "value": 0,
+       "why": "what is not absorbed pumps nothing"
       },
       {
        "bound": "at least",
@@ -717,10 +719,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at most",
        "text": "100 %",
-       "value": 1
+       "value": 1,
+       "why": "the medium absorbs no more than all of the pump"
       }
      ],
-     "why": "the medium absorbs between nothing and all of the pump",
      "usual": {
       "low": {
        "text": "10 %",
@@ -744,7 +746,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0",
-       "value": 0
+       "value": 0,
+       "why": "without excited ions there is no pulse"
       },
       {
        "bound": "at least",
@@ -754,10 +757,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at most",
        "text": "2",
-       "value": 2
+       "value": 2,
+       "why": "cross-relaxation gives at most two ions per photon"
       }
      ],
-     "why": "cross-relaxation gives at most two ions per photon",
      "usual": {
       "low": {
        "text": "0.3",
@@ -880,7 +883,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0 %",
-       "value": 0
+       "value": 0,
+       "why": "a coupler that reflects nothing makes no resonator"
       },
       {
        "bound": "at least",
@@ -890,10 +894,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "below",
        "text": "100 %",
-       "value": 1
+       "value": 1,
+       "why": "a coupler that reflects everything lets no light out"
       }
      ],
-     "why": "a coupler that reflects nothing makes no resonator, and one that reflects everything lets no light out",
      "usual": {
       "low": {
        "text": "1 %",
@@ -916,15 +920,16 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "at least",
        "text": "0 %",
-       "value": 0
+       "value": 0,
+       "why": "a passive element adds no light"
       },
       {
        "bound": "below",
        "text": "100 %",
-       "value": 1
+       "value": 1,
+       "why": "a resonator that loses everything cannot lase"
       }
      ],
-     "why": "every resonator loses some of its light in a round trip, and none that works loses all of it",
      "usual": {
       "low": {
        "text": "0.01 %",
@@ -933,7 +938,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       "high": {
        "text": "70 %",
        "value": 0.7
-      }
+      },
+      "why": "no resonator is without loss, and the optimum coupling follows from it"
      }
     },
     "beam": {
@@ -1024,7 +1030,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0 %",
-       "value": 0
+       "value": 0,
+       "why": "a switch that blocks nothing is none; leave the key out if the loss is not known"
       },
       {
        "bound": "at least",
@@ -1034,10 +1041,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "below",
        "text": "100 %",
-       "value": 1
+       "value": 1,
+       "why": "no switch blocks completely; give the measured loss, or leave the key out"
       }
      ],
-     "why": "no switch blocks completely, and one that blocks nothing is none: give the measured loss, or leave the key out",
      "usual": {
       "low": {
        "text": "10 %",
@@ -1092,7 +1099,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
       {
        "bound": "above",
        "text": "0 us",
-       "value": 0
+       "value": 0,
+       "why": "before the pump starts nothing is stored"
       },
       {
        "bound": "at least",
@@ -1105,7 +1113,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 100
       }
      ],
-     "why": "before the pump starts nothing is stored",
      "usual": {
       "low": {
        "text": "100 ns",
@@ -1210,7 +1217,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         {
          "bound": "above",
          "text": "0 %",
-         "value": 0
+         "value": 0,
+         "why": "an absorber that passes nothing never opens"
         },
         {
          "bound": "at least",
@@ -1220,10 +1228,10 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         {
          "bound": "below",
          "text": "100 %",
-         "value": 1
+         "value": 1,
+         "why": "an absorber that passes everything switches nothing"
         }
        ],
-       "why": "an absorber that passes everything switches nothing, and one that passes nothing never opens",
        "usual": {
         "low": {
          "text": "5 %",
@@ -1417,7 +1425,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         {
          "bound": "at least",
          "text": "1",
-         "value": 1
+         "value": 1,
+         "why": "light in the absorber is no faster than in vacuum"
         },
         {
          "bound": "at most",
@@ -1425,7 +1434,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
          "value": 5
         }
        ],
-       "why": "light in the absorber is no faster than in vacuum",
        "usual": {
         "low": {
          "text": "1.3",
@@ -1643,7 +1651,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        {
         "bound": "at least",
         "text": "1",
-        "value": 1
+        "value": 1,
+        "why": "a hot spot is at least as bright as the smooth beam"
        },
        {
         "bound": "at most",
@@ -1651,7 +1660,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         "value": 1000
        }
       ],
-      "why": "a hot spot is at least as bright as the smooth beam",
       "usual": {
        "low": {
         "text": "1",
@@ -1675,7 +1683,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        {
         "bound": "at least",
         "text": "1",
-        "value": 1
+        "value": 1,
+        "why": "a margin below 1 is damage"
        },
        {
         "bound": "at most",
@@ -1683,7 +1692,6 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
         "value": 1000
        }
       ],
-      "why": "a margin below 1 is damage",
       "usual": {
        "low": {
         "text": "1",

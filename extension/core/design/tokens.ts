@@ -1,0 +1,95 @@
+import { type CST, Lexer, Parser } from 'yaml';
+import type { Findings } from './finding.ts';
+import { lineAt } from './lines.ts';
+
+/** Bounds on the work that one text can cause; a design of 300 lines has some 4,000 tokens. */
+export const MAX_TOKENS = 100_000;
+export const MAX_DEPTH = 64;
+
+/** A quote or bracket without its partner. */
+export interface Unclosed {
+  readonly offset: number;
+  readonly mark: string;
+}
+
+/** Tokens of the first document. Directives are passed over: a design is YAML 1.2 whatever its `%YAML` line says. */
+export function firstDocument(text: string, findings: Findings): { tokens: CST.Token[]; complete: boolean } {
+  const parser = new Parser();
+  const tokens: CST.Token[] = [];
+  let seen = false;
+  let count = 0;
+  const take = (parsed: Iterable<CST.Token>): boolean => {
+    for (const token of parsed) {
+      if (token.type === 'directive') continue;
+      if (token.type === 'document') {
+        if (seen) {
+          const message = 'A second document begins here; only the first is read.';
+          findings.add('several-documents', '', lineAt(text, token.offset), message);
+          return false;
+        }
+        seen = true;
+      }
+      tokens.push(token);
+    }
+    return true;
+  };
+  for (const lexeme of new Lexer().lex(text)) {
+    if (++count > MAX_TOKENS) {
+      const message = `More than ${MAX_TOKENS} words and marks: what follows is not read.`;
+      findings.add('file-too-large', '', lineAt(text, parser.offset), message);
+      take(parser.end());
+      return { tokens, complete: false };
+    }
+    if (!take(parser.next(lexeme))) return { tokens, complete: true };
+  }
+  take(parser.end());
+  return { tokens, complete: true };
+}
+
+/**
+ * Empties what lies deeper than the bound and says where the first of it stood; lists what is not closed.
+ * The composer is recursive: 100,000 opening braces would end the process, not only the call.
+ */
+export function prepareTokens(tokens: readonly CST.Token[]): { tooDeep?: number; unclosed: readonly Unclosed[] } {
+  const unclosed: Unclosed[] = [];
+  let tooDeep: number | undefined;
+  let level: readonly CST.Token[] = tokens;
+  for (let depth = 0; level.length > 0; depth++) {
+    const next: CST.Token[] = [];
+    for (const token of level) {
+      const mark = unclosedMark(token);
+      if (mark !== undefined) unclosed.push({ offset: token.offset, mark });
+      if (token.type === 'document' && token.value !== undefined) next.push(token.value);
+      if (!('items' in token)) continue;
+      if (depth > MAX_DEPTH) {
+        tooDeep = Math.min(tooDeep ?? token.offset, token.offset);
+        token.items.length = 0;
+      }
+      for (const item of token.items) {
+        if (item.key) next.push(item.key);
+        if (item.value) next.push(item.value);
+      }
+    }
+    level = next;
+  }
+  return { ...(tooDeep === undefined ? {} : { tooDeep }), unclosed: tooDeep === undefined ? unclosed : [] };
+}
+
+function unclosedMark(token: CST.Token): string | undefined {
+  switch (token.type) {
+    case 'flow-collection': {
+      const closed = token.end.some(({ source }) => source === '}' || source === ']');
+      return closed ? undefined : token.start.source;
+    }
+    case 'double-quoted-scalar':
+    case 'single-quoted-scalar': {
+      const quote = token.source[0] ?? '';
+      // A last quote that is escaped, or doubled, closes nothing.
+      const body = token.source.slice(1);
+      const closed = quote === '"' ? /(?:^|[^\\])(?:\\\\)*"$/.test(body.slice(-100)) : body.endsWith("'");
+      return closed ? undefined : quote;
+    }
+    default:
+      return undefined;
+  }
+}
