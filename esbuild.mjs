@@ -27,7 +27,9 @@ const bundles = [
     ...node,
     entryPoints: ['extension/cli/main.ts'],
     outfile: 'dist/giantpulse.cjs',
-    banner: { js: '#!/usr/bin/env node' },
+    // A dependency asks for its own URL, which a CommonJS bundle has only as a path.
+    define: { ...shared.define, 'import.meta.url': 'bundleUrl' },
+    banner: { js: "#!/usr/bin/env node\nconst bundleUrl = require('node:url').pathToFileURL(__filename).href;" },
   },
   { ...node, entryPoints: ['extension/server/main.ts'], outfile: 'dist/server.cjs' },
   { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },

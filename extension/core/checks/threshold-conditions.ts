@@ -1,6 +1,6 @@
 import { SCALED_RANGE, SHORTEST_SCALED, WAVELENGTH_MISMATCH } from '../physics/damage.ts';
 import type { Surface } from '../physics/gain-module.ts';
-import { formatQuantity } from '../quantity/format.ts';
+import { formatQuantity, formatWavelength } from '../quantity/format.ts';
 import type { Check, Finding } from './check.ts';
 
 /** A threshold measured under conditions too far from this pulse: another wavelength, or far shorter or longer pulses. */
@@ -18,11 +18,11 @@ export const thresholdConditions: Check = {
 
 function otherWavelength({ threshold, path }: Surface, wavelength: number): Finding[] {
   if (Math.abs(threshold.wavelength / wavelength - 1) <= WAVELENGTH_MISMATCH) return [];
-  const at = formatQuantity(threshold.wavelength, 'length', 4);
+  const at = formatWavelength(threshold.wavelength);
   return [
     {
       severity: 'warning',
-      message: `The threshold was measured at ${at}, the laser runs at ${formatQuantity(wavelength, 'length', 4)}. Thresholds are not scaled across wavelengths: take this margin as a hint only.`,
+      message: `The threshold was measured at ${at}, the laser runs at ${formatWavelength(wavelength)}. Thresholds are not scaled across wavelengths: take this margin as a hint only.`,
       path: `${path}.damage_threshold.wavelength`,
     },
   ];

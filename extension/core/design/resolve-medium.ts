@@ -7,7 +7,7 @@ import {
   type MediumRow,
   mediumNames,
 } from '../physics/materials.ts';
-import { formatQuantity } from '../quantity/format.ts';
+import { formatWavelength } from '../quantity/format.ts';
 import type { Fix, Problem, TextRange } from '../report/problem.ts';
 import type { GainMediumSection } from './generated/gain-module.ts';
 import type { Origins } from './origins.ts';
@@ -77,7 +77,7 @@ export function resolveMedium(section: Section, origins: Origins, report: Report
 }
 
 function rowName(row: MediumRow): string {
-  return `${row.name} at ${formatQuantity(row.wavelength, 'length', 4)}`;
+  return `${row.name} at ${formatWavelength(row.wavelength)}`;
 }
 
 function tellMissing(section: Section, material: string, missing: readonly string[], report: Report): void {
@@ -94,7 +94,7 @@ function tellMissing(section: Section, material: string, missing: readonly strin
     return;
   }
   if (section.wavelength && !findLine(medium, section.wavelength.value)) {
-    const lines = lineWavelengths(medium.name).map((line) => formatQuantity(line, 'length', 4));
+    const lines = lineWavelengths(medium.name).map((line) => formatWavelength(line));
     report(
       'gain_medium.wavelength',
       `The property table has no line of ${medium.name} there, only ${lines.join(', ')}. Write one of these, or ${ask}.`,

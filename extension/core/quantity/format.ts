@@ -118,3 +118,8 @@ function point(digits: string, exponent: number): string {
 function withoutPrefix(steps: readonly Step[]): Step | undefined {
   return steps.toSorted(([one], [other]) => one.length - other.length)[0];
 }
+
+/** A vacuum wavelength (m) as the trade writes it, in nm: `1064 nm`, `694.3 nm`. */
+export function formatWavelength(value: number): string {
+  return `${Number((value * 1e9).toPrecision(4))} nm`;
+}

@@ -1,0 +1,17 @@
+import type { Analysis } from '../analyse.ts';
+import { createPositions, positionsOf } from './position.ts';
+
+/** `giantpulse predict --format json`: one object, SI with the unit in the name, what does not apply left out. */
+export function predictionJson(file: string, text: string, analysis: Analysis): string {
+  const positionAt = createPositions(text);
+  const { prediction, design, problems } = analysis;
+  const title = design.values.title;
+  const findings = problems.map(({ code, severity, message, path, range }) => ({
+    code,
+    severity,
+    message,
+    path,
+    range: positionsOf(range, positionAt),
+  }));
+  return `${JSON.stringify({ file, ...(title !== undefined && { title }), ...prediction, findings }, null, 2)}\n`;
+}
