@@ -14,7 +14,7 @@ export function headlineFigures(prediction: Prediction | undefined): readonly Fi
 }
 
 /** Everything else that is predicted; a figure that does not apply is left out. */
-export function figureGroups(prediction: Prediction): readonly FigureGroup[] {
+export function figureGroups(prediction: Prediction, holdOffMargin: number | undefined): readonly FigureGroup[] {
   const { pulse, state, train, coupling } = prediction;
   const groups = [
     group('Pulse', [
@@ -23,12 +23,13 @@ export function figureGroups(prediction: Prediction): readonly FigureGroup[] {
       figure('Fires after pump start', train.fires_at_s, 'time'),
       figure('Pulses per pump pulse', train.pulses_per_pump_pulse, 'ratio'),
     ]),
-    group('Inversion', [
+    group('Store and hold-off', [
       figure('Stored energy', state.stored_energy_J, 'energy'),
       figure('Extraction efficiency', state.extraction_efficiency, 'percent'),
       figure('Inversion ratio', state.inversion_ratio, 'ratio'),
       figure('Round-trip gain (log)', state.round_trip_gain_log, 'ratio'),
       figure('Round-trip loss (log)', state.round_trip_loss_log, 'ratio'),
+      figure('Hold-off margin', holdOffMargin, 'ratio'),
     ]),
     group('Output coupling', [
       figure('Optimum reflectivity', coupling.optimum_reflectivity, 'percent'),

@@ -2,7 +2,8 @@ import type { Hover } from 'vscode-languageserver-protocol';
 import type { Analysis } from '../core/analyse.ts';
 import type { TreeNode } from '../core/design/tree.ts';
 import type { TextRange } from '../core/report/problem.ts';
-import { defaultsIn, keyHelp } from './key-help.ts';
+import { filledIn } from './filled-in.ts';
+import { keyHelp } from './key-help.ts';
 import { code, escaped } from './markdown.ts';
 import type { ToRange } from './range.ts';
 import { fullSummary, summary } from './summary.ts';
@@ -34,31 +35,29 @@ function holds({ start, end }: TextRange, offset: number): boolean {
   return offset >= start && offset <= end;
 }
 
-function about({ design }: Analysis, node: TreeNode): readonly string[] {
+function about({ design, resolved }: Analysis, node: TreeNode): readonly string[] {
   const written = node.text === undefined ? '' : ` = ${code(node.text)}`;
   const heading = `**${escaped(node.path)}**${written}`;
   const schema = design.schemaOf(node.path);
   if (schema === undefined) return [heading];
   const help = [heading, ...keyHelp(schema)];
-  if (schema.kind !== 'section') return help;
-  const defaults = defaultsIn(schema, (key) => node.entries?.has(key) ?? false);
-  return defaults.length === 0 ? help : [...help, `Not written here: ${defaults.join('; ')}.`];
+  const filled = filledIn(resolved.origins, node.path);
+  return filled.length === 0 ? help : [...help, `Not written here, so filled in:\n${filled.join('\n')}`];
 }
 
 /** How the prediction stands against the requirement or the surface that the path belongs to. */
 function judged({ prediction, problems }: Analysis, path: string): readonly string[] {
   if (prediction === undefined) return [];
-  const [section = '', key = '', bound] = path.split('.');
+  const [section = '', key = ''] = path.split('.');
   const wanted = prediction.requirements.filter(
-    ({ name }) =>
-      section === 'requirements' && (bound === undefined ? name.startsWith(`${key} `) : name === `${key} ${bound}`),
+    ({ name }) => section === 'requirements' && (key === '' || name === key),
   );
   const index = Number(/^surfaces\[(\d+)\]/.exec(path)?.[1]);
   const surface = prediction.surfaces[index];
   return [
-    ...wanted.map(requirementRow).map(({ required, predicted, verdict }) => {
-      if (predicted === undefined) return `Required ${required}; not predicted by this model.`;
-      return `Required ${required}, predicted ${predicted}: ${verdict === 'good' ? 'met' : '**missed**'}.`;
+    ...wanted.map(requirementRow).map(({ name, required, predicted, verdict }) => {
+      if (predicted === undefined) return `${name} ${required}: not predicted by this model.`;
+      return `${name} ${required}, predicted ${predicted}: ${verdict === 'good' ? 'met' : '**missed**'}.`;
     }),
     ...(surface === undefined ? [] : [surfaceRow(surface, index, problems)]).map(({ fluence, threshold, margin }) => {
       const against = threshold === undefined ? '' : ` against a threshold of ${threshold} at this pulse's width`;

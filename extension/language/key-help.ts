@@ -1,4 +1,4 @@
-import type { Limit, QuantitySchema, SchemaNode, SectionSchema } from '../core/design/schema.ts';
+import type { Limit, QuantitySchema, SchemaNode } from '../core/design/schema.ts';
 import { raised } from './show.ts';
 
 /** What the schema says of a key, as lines of Markdown. */
@@ -12,13 +12,6 @@ export function keyHelp(schema: SchemaNode): readonly string[] {
       : []),
     ...(schema.default === undefined ? [] : [`If left out: ${raised(schema.default)}.`]),
   ];
-}
-
-/** The keys of a section that are not written although something holds in their place. */
-export function defaultsIn(schema: SectionSchema, isWritten: (key: string) => boolean): readonly string[] {
-  return Object.entries(schema.keys).flatMap(([key, { default: standing }]) =>
-    standing === undefined || isWritten(key) ? [] : [`\`${key}\`: ${raised(standing)}`],
-  );
 }
 
 function allowedValues(schema: SchemaNode): string | undefined {
@@ -37,13 +30,12 @@ function allowedValues(schema: SchemaNode): string | undefined {
 }
 
 /** The narrowest bound on either side: of `above 0` and `at least 1e-7`, a person needs the first. */
-function limits({ limits: all, why }: QuantitySchema): string | undefined {
-  const lower = first(all, 'above') ?? first(all, 'at least');
-  const upper = first(all, 'below') ?? first(all, 'at most');
-  const bounds = [lower, upper].filter((limit) => limit !== undefined);
-  if (bounds.length === 0) return undefined;
-  const text = bounds.map(({ bound, text }) => `${bound} ${raised(text)}`).join(', ');
-  return why === undefined ? text : `${text} (${why})`;
+function limits({ limits: all }: QuantitySchema): string | undefined {
+  const bounds = [first(all, 'above') ?? first(all, 'at least'), first(all, 'below') ?? first(all, 'at most')];
+  const known = bounds.filter((limit) => limit !== undefined);
+  if (known.length === 0) return undefined;
+  const [why] = known.flatMap(({ why: reason }) => (reason === undefined ? [] : [` (${reason})`]));
+  return `${known.map(({ bound, text }) => `${bound} ${raised(text)}`).join(', ')}${why ?? ''}`;
 }
 
 function first(limits: readonly Limit[], bound: Limit['bound']): Limit | undefined {

@@ -29,7 +29,7 @@ export function readout(analysis: Analysis, subject: ReadoutSubject): ReadoutSta
       ? {}
       : {
           model: modelName(prediction),
-          groups: figureGroups(prediction),
+          groups: figureGroups(prediction, analysis.outcome?.holdOffMargin),
           surfaces: prediction.surfaces.map((surface, index) => surfaceRow(surface, index, problems)),
           requirements: prediction.requirements.map(requirementRow),
           validity: prediction.validity.map(({ message }) => message),

@@ -1,7 +1,8 @@
 import type { RequirementFigures, SurfaceFigures } from '../core/physics/prediction.ts';
 import type { Problem } from '../core/report/problem.ts';
+import { formatLimits, formatRequirement } from '../core/report/requirement-text.ts';
 import type { RequirementRow, SurfaceRow, Verdict } from '../protocol/readout.ts';
-import { type Kind, show } from './show.ts';
+import { show } from './show.ts';
 
 /** J/m² in one J/cm². */
 const perSquareCentimetre = 1e4;
@@ -30,28 +31,12 @@ function verdictOf(path: string, problems: readonly Problem[]): Verdict {
   return about.some(({ severity }) => severity === 'warning') ? 'look' : 'good';
 }
 
-const kinds: Readonly<Record<string, Kind>> = {
-  pulse_energy: 'energy',
-  first_pulse_energy: 'energy',
-  pulse_width: 'time',
-  build_up_time: 'time',
-  timing_jitter: 'time',
-  peak_power: 'power',
-  average_power: 'power',
-  repetition_rate: 'frequency',
-  energy_stability: 'percent',
-  divergence: 'angle',
-};
-
-export function requirementRow(requirement: RequirementFigures): RequirementRow {
-  const [key = '', bound = ''] = requirement.name.split(' ');
-  const kind = kinds[key] ?? 'ratio';
-  const predicted = show(requirement.predicted, kind);
-  const name = key.replaceAll('_', ' ');
+export function requirementRow({ name, met, predicted, minimum, maximum }: RequirementFigures): RequirementRow {
+  const words = name.replaceAll('_', ' ');
   return {
-    name: name.charAt(0).toUpperCase() + name.slice(1),
-    required: `${bound === 'max' ? '≤' : '≥'} ${show(requirement.required, kind)}`,
-    ...(predicted === undefined ? {} : { predicted }),
-    verdict: requirement.met === undefined ? 'unknown' : requirement.met ? 'good' : 'bad',
+    name: words.charAt(0).toUpperCase() + words.slice(1),
+    required: formatLimits(name, minimum, maximum),
+    ...(predicted === undefined ? {} : { predicted: formatRequirement(name, predicted) }),
+    verdict: met === undefined ? 'unknown' : met ? 'good' : 'bad',
   };
 }

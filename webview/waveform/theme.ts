@@ -25,7 +25,7 @@ export function chartTheme(): ChartTheme {
     text,
     grid: colour(highContrast ? ['--vscode-contrastBorder'] : ['--vscode-editorIndentGuide-background1'], text),
     power: highContrast ? text : colour(['--vscode-charts-blue'], text),
-    inversion: colour(['--vscode-charts-orange'], text),
+    inversion: colour(['--vscode-charts-yellow'], text),
     surface: colour(['--vscode-editorHoverWidget-background', '--vscode-editor-background'], 'Canvas'),
     border: colour(['--vscode-contrastBorder', '--vscode-editorHoverWidget-border'], text),
     font: colour(['--vscode-font-family'], 'sans-serif'),

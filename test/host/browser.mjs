@@ -1,0 +1,51 @@
+// Debian's Chromium, and the few things that the tests do with a workbench in it.
+import { chromium } from 'playwright-core';
+
+export function startBrowser() {
+  return chromium.launch({
+    executablePath: process.env.CHROMIUM ?? '/usr/bin/chromium',
+    headless: true,
+    args: [
+      '--no-sandbox',
+      '--disable-gpu',
+      '--disable-quic',
+      '--no-first-run',
+      '--disable-background-networking',
+      '--disable-component-update',
+      '--disable-sync',
+    ],
+  });
+}
+
+/** Waits until the workbench and its editors are restored: earlier the palette knows too little. */
+export async function restored(page) {
+  await page.locator('.monaco-workbench').waitFor();
+  await page.evaluate(() => window.driver.whenWorkbenchRestored());
+}
+
+/** The entry of the open quick pick with exactly this label: the list is not sorted best first, so Enter may take another. */
+export function quickPick(page, label) {
+  const exact = new RegExp(`^\\s*${label.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&')}\\s*$`);
+  return page
+    .locator('.quick-input-list .monaco-list-row')
+    .filter({ has: page.locator('.label-name', { hasText: exact }) })
+    .first();
+}
+
+export async function runCommand(page, title) {
+  await page.keyboard.press('F1');
+  await page.locator('.quick-input-widget input[type="text"]').fill(`>${title}`);
+  await quickPick(page, title).click();
+}
+
+/** The extension's document in its webview: VS Code's outer frame, then the frame that it shows. */
+export function webview(page) {
+  const outer = 'iframe.webview.ready[src*="extensionId=giant-pulse.giantpulse"]';
+  return page.frameLocator(outer).frameLocator('iframe#active-frame');
+}
+
+/** A word in the editor's text, on the first line that holds `line`. */
+export function word(page, line, text) {
+  const exact = new RegExp(`^\\s*${text.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&')}\\s*$`);
+  return page.locator('.view-line', { hasText: line }).first().locator('span', { hasText: exact }).last();
+}

@@ -1,0 +1,52 @@
+// What needs a browser and a real VS Code: `npm run test:system`. Nothing is skipped; each part must close with its own line.
+import { spawn } from 'node:child_process';
+import { existsSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { build } from 'esbuild';
+import { setUp } from './setup.mjs';
+
+const here = dirname(fileURLToPath(import.meta.url));
+
+function run(part) {
+  return new Promise((done) => {
+    console.log(`\n${part}`);
+    const child = spawn(process.execPath, [join(here, part)], { stdio: ['ignore', 'pipe', 'inherit'] });
+    let output = '';
+    child.stdout.on('data', (chunk) => {
+      output += chunk;
+      process.stdout.write(chunk);
+    });
+    child.once('exit', () => {
+      const closing = /^(\d+) passed, (\d+) failed$/.exec(output.trimEnd().split('\n').at(-1) ?? '');
+      if (closing === null) console.log(`${part} ended without its closing line`);
+      done(closing === null ? { passed: 0, failed: 1 } : { passed: Number(closing[1]), failed: Number(closing[2]) });
+    });
+  });
+}
+
+const browser = process.env.CHROMIUM ?? '/usr/bin/chromium';
+if (!existsSync(browser))
+  throw new Error(`no browser at ${browser}: install Debian's chromium, or name one in CHROMIUM`);
+setUp();
+await build({
+  entryPoints: [join(here, 'suite/index.ts')],
+  outfile: join(here, 'dist/suite.cjs'),
+  bundle: true,
+  platform: 'node',
+  format: 'cjs',
+  target: 'node20',
+  external: ['vscode'],
+  logLevel: 'warning',
+});
+const parts = ['extension-host.mjs', 'end-to-end.mjs'];
+if (process.env.GIANTPULSE_DESKTOP_CODE !== undefined) parts.push('desktop.mjs');
+let passed = 0;
+let failed = 0;
+for (const part of parts) {
+  const counts = await run(part);
+  passed += counts.passed;
+  failed += counts.failed;
+}
+console.log(`\n${passed} passed, ${failed} failed`);
+process.exit(failed === 0 && passed > 0 ? 0 : 1);
