@@ -16,6 +16,7 @@ import { opensBeforePumpEnd } from './opens-before-pump-end.ts';
 import { pumpWavelength } from './pump-wavelength.ts';
 import { requirementMissed } from './requirement-missed.ts';
 import { requirementNotJudged } from './requirement-not-judged.ts';
+import { secondPulse } from './second-pulse.ts';
 import { thresholdConditions } from './threshold-conditions.ts';
 import { tooManyExcited } from './too-many-excited.ts';
 import { trainUnsettled } from './train-unsettled.ts';
@@ -33,6 +34,7 @@ export const CHECKS: readonly Check[] = [
   impossibleTiming,
   opensBeforePumpEnd,
   trainUnsettled,
+  secondPulse,
   pumpWavelength,
   mediumTooLong,
   tooManyExcited,

@@ -21,3 +21,14 @@ export function optimumCoupling(cavity: Cavity, balance: Balance): CouplingFigur
   if (!(outputLog > 0)) return {};
   return { optimum_reflectivity: Math.exp(-outputLog), optimum_energy_J: cavity.energyUnit * value };
 }
+
+/**
+ * The same by trial, where time matters during the pulse: `energyAt` gives the pulse energy at an output log ln(1/R),
+ * 0 where none is emitted. Searched around the optimum of the depletion form.
+ */
+export function optimumByTrial(energyAt: (outputLog: number) => number, near: CouplingFigures): CouplingFigures {
+  if (near.optimum_reflectivity === undefined) return {};
+  const guess = -Math.log(near.optimum_reflectivity);
+  const { at, value } = maximumBetween(energyAt, guess / 8, guess * 4, 1e-5);
+  return value > 0 ? { optimum_reflectivity: Math.exp(-at), optimum_energy_J: value } : {};
+}

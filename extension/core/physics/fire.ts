@@ -18,6 +18,10 @@ export interface Firing {
   readonly buildUp?: number;
   /** x at the pulse's end. */
   readonly depletion: number;
+  /** Another pulse follows within the same opening. */
+  readonly followed: boolean;
+  /** Integration steps that it took. */
+  readonly steps: number;
   /** What is left in the medium. */
   readonly after: Store;
   waveform(points: number): Waveform;
@@ -59,6 +63,8 @@ export function fire(cavity: Cavity, store: Store): Firing | undefined {
     width: pulse.width * trip,
     ...(store.overfilled ? {} : { buildUp }),
     depletion: pulse.endsAt,
+    followed: false,
+    steps: 0,
     after: drain(cavity, store, (k) => -Math.expm1(-cavity.rings.intensity[k]! * pulse.endsAt)),
     waveform: (points) => depletionWaveform(cavity, depletion, pulse, points),
   };
@@ -82,6 +88,8 @@ function integrated(
     width: pulse.width,
     ...(store.overfilled ? {} : { buildUp: pulse.peakTime }),
     depletion: pulse.depletion,
+    followed: pulse.followed,
+    steps: pulse.statistics.steps,
     after: drain(cavity, store, (k) => (gain[k] === 0 ? 0 : 1 - pulse.left[k]! / gain[k]!)),
     waveform: (points) => tracedWaveform(pulse, powerOfPhoton, points),
   };

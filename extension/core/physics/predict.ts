@@ -1,8 +1,9 @@
 import { type Cavity, cavityOf, roundTripGain } from './cavity.ts';
-import { optimumCoupling } from './coupling.ts';
+import { optimumByTrial, optimumCoupling } from './coupling.ts';
 import { surfaceFigures } from './damage.ts';
+import { fire } from './fire.ts';
 import type { GainModule } from './gain-module.ts';
-import type { Prediction, PulseFigures, StateFigures, TrainFigures } from './prediction.ts';
+import type { CouplingFigures, Prediction, PulseFigures, StateFigures, TrainFigures } from './prediction.ts';
 import { judgeRequirements, type Requirement } from './requirements.ts';
 import { type Train, trainOf } from './train.ts';
 
@@ -34,7 +35,7 @@ export function predict(module: GainModule, requirements: readonly Requirement[]
       ...(pulse && { pulse }),
       state: stateFigures(cavity, train, gain),
       train: trainFigures,
-      coupling: optimumCoupling(cavity, train.balance),
+      coupling: coupling(cavity, train),
       surfaces: pulse
         ? module.surfaces.map((surface) => surfaceFigures(module, surface, pulse.energy_J, pulse.width_fwhm_s))
         : [],
@@ -44,6 +45,16 @@ export function predict(module: GainModule, requirements: readonly Requirement[]
     train,
     ...holdOff,
   };
+}
+
+function coupling(cavity: Cavity, train: Train): CouplingFigures {
+  const figures = optimumCoupling(cavity, train.balance);
+  if (train.settled?.model !== 'time_integration') return figures;
+  return optimumByTrial((outputLog) => {
+    const trial = { ...cavity, outputLog, loss: outputLog + cavity.dissipativeLog };
+    const fired = cavity.module.pump.kind === 'continuous' ? trainOf(trial).settled : fire(trial, train.store);
+    return fired?.energy ?? 0;
+  }, figures);
 }
 
 function pulseFigures({ settled }: Train): PulseFigures | undefined {

@@ -1,6 +1,7 @@
 import { type AcceptedStep, type IntegrationOutcome, integrate, type RightHandSide } from '../numerics/dop853.ts';
 import { rootBetween } from '../numerics/root.ts';
 import type { Cavity } from './cavity.ts';
+import { smallSignalGain } from './depletion.ts';
 import { openingLoss, openingStart } from './opening.ts';
 import { createTrace, type Trace } from './trace.ts';
 
@@ -12,6 +13,8 @@ export interface IntegratedPulse {
   readonly width: number;
   /** Field has fallen to 1 % of the peak. */
   readonly endTime: number;
+  /** The field grows again after this pulse. */
+  readonly followed: boolean;
   /** x reached at the end, as in `depletion.ts`. */
   readonly depletion: number;
   /** Each ring's share of the gain after the pulse that its upper level holds. */
@@ -33,12 +36,14 @@ const RINGS = 2;
 /** The pulse is over where the field has fallen to e^−23 (1e-10) of its peak. */
 const TAIL = 23;
 const HUNDREDTH = Math.log(100);
+/** A pulse takes some 60 steps; one that takes so many more is none. */
+const MOST_STEPS = 4000;
 
 /**
  * The rate equations with their spontaneous source, ring by ring:
  * dφ/dt = [(G − loss(t))φ + G]/t_r and dN/dt = −ψ n dx/dt with dx/dt = 2γσφ/(A t_r), solved for ln(1 + φ),
  * in which build-up is a straight line. Undefined where no pulse ends before `until` (s).
- * Independent of `depletion.ts`; both must agree where the switch opens at once.
+ * Independent of the depletion form; both must agree where the switch opens at once.
  */
 export function integratePulse(
   cavity: Cavity,
@@ -50,13 +55,15 @@ export function integratePulse(
 ): IntegratedPulse | undefined {
   const count = gain.length;
   const initial = new Float64Array(RINGS + (lower ? 2 : 1) * count);
-  initial[FIELD] = Math.log1p(photons);
+  const opening = openingStart(cavity, smallSignalGain(gain), photons);
+  initial[FIELD] = Math.log1p(opening.photons);
   initial.set(gain, RINGS);
   const rhs = rateEquations(cavity, count, lower);
   const trace = createTrace(count, lower?.weight ?? 0);
   let peak = { time: Number.NaN, field: Number.NEGATIVE_INFINITY };
   let halfTime = Number.NaN;
   let endTime = Number.NaN;
+  let followed = false;
   const slope = new Float64Array(initial.length);
   const scratch = new Float64Array(initial.length);
   const growth = (step: AcceptedStep, time: number) => {
@@ -80,19 +87,25 @@ export function integratePulse(
     }
     if (Number.isNaN(halfTime) && field < peak.field - Math.LN2) halfTime = crossing(step, peak.field - Math.LN2);
     if (Number.isNaN(endTime) && field < peak.field - HUNDREDTH) endTime = crossing(step, peak.field - HUNDREDTH);
-    return field < peak.field - TAIL;
+    rhs(step.end, step.after, slope);
+    if (slope[FIELD]! > 0 && !Number.isNaN(halfTime)) {
+      // The loss still falls, or the inversion refills: another pulse follows, and this one ends between them.
+      followed = true;
+      endTime = Number.isNaN(endTime) ? step.end : endTime;
+    }
+    return followed || field < peak.field - TAIL;
   };
   const options = {
     relativeTolerance: tolerance,
     absoluteTolerance: absoluteTolerances(initial, gain, tolerance),
-    maximumSteps: 20_000,
+    maximumSteps: MOST_STEPS,
   };
   const { openingTime } = cavity.module.qSwitch;
   let outcome: IntegrationOutcome | undefined;
   let evaluations = 0;
   let steps = 0;
   for (const [from, to] of [
-    [openingStart(cavity), Math.min(openingTime, until)],
+    [opening.time, Math.min(openingTime, until)],
     [openingTime, until],
   ] as const) {
     if (!(to > from) || outcome?.status === 'stopped') continue;
@@ -108,6 +121,7 @@ export function integratePulse(
     peakTime: peak.time,
     width: halfTime - rise,
     endTime,
+    followed,
     depletion: outcome.state[DEPLETION]!,
     left: outcome.state.slice(RINGS, RINGS + count),
     trace,
@@ -141,7 +155,6 @@ function rateEquations(cavity: Cavity, count: number, lower: LowerLevel | undefi
 
 /** Rings count by their share in the gain, the field by its logarithm, depletion by its size. */
 function absoluteTolerances(initial: Float64Array, gain: Float64Array, tolerance: number): Float64Array {
-  let total = 0;
-  for (const share of gain) total += Math.abs(share);
-  return initial.map((_, i) => (i < RINGS ? tolerance : tolerance * total * 0.1));
+  const whole = smallSignalGain(gain.map(Math.abs));
+  return initial.map((_, i) => (i < RINGS ? tolerance : tolerance * whole * 0.1));
 }

@@ -25,6 +25,10 @@ const MOST_OPENINGS = 240;
 const MEAN_OVER = 64;
 /** Relative change of gain from opening to opening at which a train is settled. */
 const SETTLED = 1e-11;
+/** The same where pulses are integrated in time, to about 1e-10 each. */
+const SETTLED_INTEGRATED = 1e-9;
+/** Integration steps allowed for a train; one pulse takes about 60. */
+const MOST_STEPS = 20_000;
 /** After so many openings in a row that came closer to balance, the train is taken to reach it. */
 const APPROACHES = 8;
 
@@ -64,16 +68,15 @@ function follow(
   balance: Balance,
 ) {
   const idle = balance.store(0);
-  const depletion = balancedDepletion(balance, cavity.loss);
-  const target = depletion === undefined ? undefined : balance.store(depletion);
-  const reachable = target && roundTripGain(cavity, target.ions) < limit ? target : undefined;
-  const goal = reachable ? roundTripGain(cavity, reachable.ions) : Number.NaN;
+  const goal = balanced(cavity, balance, limit);
+  const goalGain = goal ? roundTripGain(cavity, goal.store.ions) : Number.NaN;
   const energies: number[] = [];
   let store = fill(emptyStore(cavity), { ...schedule, idle: 0 });
   let first: Firing | undefined;
-  let largest: { readonly store: Store; readonly settled: Firing } | undefined;
+  let largest: Balanced | undefined;
   let approaches = 0;
-  for (let opening = 0; opening < MOST_OPENINGS; opening++) {
+  let steps = 0;
+  for (let opening = 0; opening < MOST_OPENINGS && steps < MOST_STEPS; opening++) {
     if (!(roundTripGain(cavity, store.ions) > cavity.loss)) {
       const waited = untilThreshold(cavity, store, idle, lost);
       if (waited === undefined) return { store: idle, ...ended(first, undefined, 0, false) };
@@ -81,22 +84,49 @@ function follow(
     }
     const fired = fire(cavity, store);
     first ??= fired;
+    steps += fired?.steps ?? 0;
     if (fired && fired.energy >= (largest?.settled.energy ?? 0)) largest = { store, settled: fired };
     energies.push(fired?.energy ?? 0);
     const next = fill(fired?.after ?? store, schedule);
     const gain = roundTripGain(cavity, store.ions);
     const nextGain = roundTripGain(cavity, next.ions);
-    if (Math.abs(nextGain - gain) <= SETTLED * gain)
-      return { store, ...ended(first, fired, fired?.energy ?? 0, false) };
-    approaches = fired && Math.abs(nextGain - goal) < Math.abs(gain - goal) ? approaches + 1 : 0;
-    const settled =
-      reachable && approaches >= APPROACHES && fired?.model === 'depletion' ? fire(cavity, reachable) : undefined;
-    if (reachable && settled) return { store: reachable, ...ended(first, settled, settled.energy, false) };
+    const near = fired?.model === 'time_integration' ? SETTLED_INTEGRATED : SETTLED;
+    if (Math.abs(nextGain - gain) <= near * gain) return { store, ...ended(first, fired, fired?.energy ?? 0, false) };
+    approaches = fired && Math.abs(nextGain - goalGain) < Math.abs(gain - goalGain) ? approaches + 1 : 0;
+    if (goal && approaches >= APPROACHES)
+      return { store: goal.store, ...ended(first, goal.settled, goal.settled.energy, false) };
     store = next;
   }
   const tail = energies.slice(-MEAN_OVER);
   const mean = tail.reduce((sum, energy) => sum + energy, 0) / tail.length;
   return { store: largest?.store ?? store, ...ended(first, largest?.settled, mean, true) };
+}
+
+/** A store and the pulse that comes of it. */
+interface Balanced {
+  readonly store: Store;
+  readonly settled: Firing;
+}
+
+/**
+ * The pulse of a train in balance, where the pulse takes just the depletion that it was assumed to; undefined where
+ * there is none, the switch would not hold, or a lower level of its own makes depletion say too little.
+ */
+function balanced(cavity: Cavity, balance: Balance, limit: number): Balanced | undefined {
+  if (cavity.module.medium.lowerLevelLifetime !== undefined) return undefined;
+  let depletion = balancedDepletion(balance, cavity.loss);
+  let previous: { readonly at: number; readonly miss: number } | undefined;
+  for (let pass = 0; pass < 12 && depletion !== undefined && depletion > 0; pass++) {
+    const store = balance.store(depletion);
+    const settled = roundTripGain(cavity, store.ions) < limit ? fire(cavity, store) : undefined;
+    if (!settled) return undefined;
+    const miss = settled.depletion - depletion;
+    if (settled.model === 'depletion' || Math.abs(miss) <= SETTLED_INTEGRATED * depletion) return { store, settled };
+    const at = depletion;
+    depletion = previous ? at - (miss * (at - previous.at)) / (miss - previous.miss) : settled.depletion;
+    previous = { at, miss };
+  }
+  return undefined;
 }
 
 function ended(first: Firing | undefined, settled: Firing | undefined, meanEnergy: number, unsettled: boolean) {
