@@ -1,5 +1,6 @@
 import type { Beam } from '../physics/gain-module.ts';
 import { pumpWithin } from '../physics/rings.ts';
+import { formatPercent, formatQuantity } from '../quantity/format.ts';
 import type { Check, Finding } from './check.ts';
 
 const ALLOWED_OUTSIDE = 0.01;
@@ -14,7 +15,7 @@ export const beamBeyondMedium: Check = {
     const outside = (beam: Beam, path: string, what: string): Finding[] => {
       const lost = 1 - pumpWithin(beam, diameter / 2);
       if (lost <= ALLOWED_OUTSIDE) return [];
-      const message = `${(lost * 100).toPrecision(2)} % of the ${what} lies outside the medium's diameter. The model lets it reach beyond, so the prediction is too high and the clipped light goes elsewhere.`;
+      const message = `${formatPercent(lost, 2)} of the ${what} lies outside the medium (${formatQuantity(diameter, 'length')} across). The model clips nothing, so the figures are too good. Narrow the beam, or count the clipped part as loss.`;
       return [{ severity: 'warning', message, path }];
     };
     return [

@@ -13,7 +13,7 @@ export const fewRoundTrips: Check = {
     return [
       {
         severity: 'information',
-        message: `The pulse lasts ${trips.toPrecision(2)} round trips (full width at half maximum). The model averages over a round trip, so width and peak power are rough here.`,
+        message: `The pulse lasts only ${trips.toPrecision(2)} round trips (full width at half maximum). The model averages over a round trip: take width and peak power as rough.`,
         path: 'resonator.length',
       },
     ];

@@ -6,11 +6,11 @@ export const fluenceNearThreshold: Check = {
   code: 'fluence-near-threshold',
   title: 'A surface keeps less than the wanted safety factor',
   run: (context) =>
-    fluenceFinding(context, ({ margin, hotSpot, threshold, fluence, surface }) =>
+    fluenceFinding(context, ({ margin, marginText, against, surface }) =>
       margin >= 1 && margin < surface.safetyFactor
         ? {
             severity: 'warning',
-            message: `Margin ${margin.toPrecision(3)}, wanted ${surface.safetyFactor.toPrecision(3)}: peak fluence ${fluence}${hotSpot} against a threshold of ${threshold} at this pulse width.`,
+            message: `Margin ${marginText}, wanted ${surface.safetyFactor}: ${against}.`,
           }
         : undefined,
     ),

@@ -6,11 +6,11 @@ export const fluenceOverThreshold: Check = {
   code: 'fluence-over-threshold',
   title: 'A surface is past its damage threshold',
   run: (context) =>
-    fluenceFinding(context, ({ margin, hotSpot, threshold, fluence }) =>
+    fluenceFinding(context, ({ margin, marginText, against }) =>
       margin < 1
         ? {
             severity: 'error',
-            message: `Peak fluence ${fluence}${hotSpot} is past the threshold of ${threshold} at this pulse width: margin ${margin.toPrecision(3)}. Enlarge the beam here, lower the energy, or use a stronger coating.`,
+            message: `Damage expected, margin ${marginText}: ${against}. Enlarge the beam here, lower the energy, or choose a coating with a higher threshold.`,
           }
         : undefined,
     ),

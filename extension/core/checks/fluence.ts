@@ -5,10 +5,9 @@ import type { CheckContext, Finding } from './check.ts';
 interface Judged {
   readonly surface: Surface;
   readonly margin: number;
-  /** Texts. */
-  readonly fluence: string;
-  readonly threshold: string;
-  readonly hotSpot: string;
+  /** Texts: margin and what it is made of. */
+  readonly marginText: string;
+  readonly against: string;
 }
 
 /** Runs a verdict over every surface that has a margin; findings fall on the surface's beam radius. */
@@ -19,13 +18,22 @@ export function fluenceFinding(
   return module.surfaces.flatMap((surface, index) => {
     const figures = outcome.figures.surfaces[index];
     if (figures?.margin === undefined || figures.threshold_J_per_cm2 === undefined) return [];
+    const fluence = formatQuantity(figures.peak_fluence_J_per_cm2 * 1e4, 'fluence');
+    const threshold = formatQuantity(figures.threshold_J_per_cm2 * 1e4, 'fluence');
+    const hotSpot = surface.hotSpotFactor === 1 ? '' : ` times a hot-spot factor of ${surface.hotSpotFactor}`;
+    const width = formatQuantity(outcome.figures.pulse?.width_fwhm_s ?? Number.NaN, 'time');
     const found = verdict({
       surface,
       margin: figures.margin,
-      fluence: formatQuantity(figures.peak_fluence_J_per_cm2 * 1e4, 'fluence'),
-      threshold: formatQuantity(figures.threshold_J_per_cm2 * 1e4, 'fluence'),
-      hotSpot: surface.hotSpotFactor === 1 ? '' : ` with a hot-spot factor of ${surface.hotSpotFactor}`,
+      marginText: roundedDown(figures.margin),
+      against: `peak fluence ${fluence}${hotSpot} against a threshold of ${threshold} at ${width}`,
     });
     return found ? [{ ...found, path: `${surface.path}.beam_radius` }] : [];
   });
+}
+
+/** Three significant digits, never up: a margin just short of 1 must not read 1.00. */
+function roundedDown(margin: number): string {
+  const step = 10 ** (Math.floor(Math.log10(margin)) - 2);
+  return (Math.floor(margin / step + 1e-9) * step).toPrecision(3);
 }

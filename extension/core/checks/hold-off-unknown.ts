@@ -11,7 +11,7 @@ export const holdOffUnknown: Check = {
           {
             severity: 'information',
             message:
-              'Without `closed_loss` the switch is taken to block wholly: pre-lasing can not be seen, and the delay starts from spontaneous emission alone.',
+              'Hold-off is not judged: without `closed_loss` the closed switch is taken to block everything. Give its loss per round trip to have pre-lasing found.',
             path: 'q_switch.kind',
           },
         ],

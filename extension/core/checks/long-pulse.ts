@@ -1,3 +1,4 @@
+import { formatPercent } from '../quantity/format.ts';
 import type { Check } from './check.ts';
 
 /** Common practice, no source: the part of the upper-level lifetime above which decay during the pulse shows in the figures. */
@@ -14,7 +15,7 @@ export const longPulse: Check = {
     return [
       {
         severity: 'information',
-        message: `Build-up and pulse take ${(part * 100).toPrecision(2)} % of the upper level's lifetime. The model leaves out pumping and decay in that time, so expect errors of that order.`,
+        message: `Build-up and pulse take ${formatPercent(part, 2)} of the upper level's lifetime. The model leaves out pumping and decay in that time: expect errors of that order.`,
         path: 'q_switch.repetition_rate',
       },
     ];

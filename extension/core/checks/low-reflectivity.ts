@@ -1,3 +1,4 @@
+import { formatPercent } from '../quantity/format.ts';
 import type { Check } from './check.ts';
 
 /** Below this the uniform-loss convention drifts from reality. Source: `physics.md`; Degnan 1989 assumes small loss per pass. */
@@ -13,8 +14,7 @@ export const lowReflectivity: Check = {
       : [
           {
             severity: 'information',
-            message:
-              'The model spreads the output loss evenly along the resonator. Below about 30 % reflectivity energy and width drift from what a travelling wave gives.',
+            message: `The output reflectivity is ${formatPercent(resonator.outputReflectivity, 2)}. The model spreads the output loss evenly along the resonator, and below about 30 % its energy and width drift from the real ones.`,
             path: 'resonator.output_reflectivity',
           },
         ],

@@ -20,7 +20,7 @@ export const lowerLevelBottleneck: Check = {
     return [
       {
         severity: 'information',
-        message: `The lower level lives about ${formatQuantity(lifetime.value, 'time', 2)} (${lifetime.source}), a photon ${formatQuantity(photonLifetime, 'time', 2)}: some of the inversion may be blocked. Give \`lower_level_lifetime\` to have it counted.`,
+        message: `The lower level lives about ${formatQuantity(lifetime.value, 'time', 2)} (${lifetime.source}), a photon in the resonator ${formatQuantity(photonLifetime, 'time', 2)}: it may not empty within the pulse, which costs energy. Give \`lower_level_lifetime\` to have it counted.`,
         path: 'gain_medium.material',
       },
     ];

@@ -18,7 +18,7 @@ function reason(
     const path = design.values.pump?.diode ? 'pump.diode.current' : 'pump.power';
     return {
       severity: 'error',
-      message: 'The pump gives no power: nothing is stored and no pulse follows. Raise the current above threshold.',
+      message: 'No pulse: the pump gives no power, so nothing is stored.',
       path,
     };
   }
@@ -27,17 +27,20 @@ function reason(
     const gate = formatQuantity(qSwitch.gate, 'time');
     return {
       severity: 'error',
-      message: `Gain exceeds loss ${ratio} times, but the pulse does not end before the switch closes again (gate ${gate}). Lengthen the gate, lower the repetition rate or raise the gain.`,
+      message: `No pulse: the gain is ${ratio} times the loss, but the pulse has not ended when the switch closes again after ${gate}. Lengthen the gate, lower the repetition rate, or raise the gain.`,
       path: design.values.q_switch?.gate ? 'q_switch.gate' : 'q_switch.repetition_rate',
     };
   }
+  const rates = `the round-trip log gain is ${gain.toPrecision(3)}, the loss ${loss.toPrecision(3)}`;
   const more =
-    gain > 0 && cavity.ground === 0
-      ? ` About ${(loss / gain).toPrecision(3)} times the pump would reach threshold.`
-      : '';
+    gain <= 0
+      ? ' The medium still absorbs at the laser wavelength: raise the pump, or shorten the medium.'
+      : cavity.ground === 0
+        ? ` ${(loss / gain).toPrecision(3)} times the pump would reach threshold. Raise the pump, or lower the loss.`
+        : ' Raise the pump, or lower the loss.';
   return {
     severity: 'error',
-    message: `Below threshold: the stored gain reaches ${gain.toPrecision(3)} against a loss of ${loss.toPrecision(3)} per round trip (logarithmic), ${ratio} times.${more} Raise the pump, or lower the loss.`,
+    message: `No pulse, below threshold: ${rates}.${more}`,
     path: design.values.pump?.diode ? 'pump.diode.current' : 'pump.power',
   };
 }

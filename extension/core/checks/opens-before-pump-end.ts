@@ -11,7 +11,7 @@ export const opensBeforePumpEnd: Check = {
     return [
       {
         severity: 'warning',
-        message: `The switch opens at ${formatQuantity(qSwitch.opensAt, 'time')}, the pump ends at ${formatQuantity(duration, 'time')}: only ions stored by the opening count, the last ${formatQuantity(duration - qSwitch.opensAt, 'time')} of pumping are lost to this pulse.`,
+        message: `The switch opens at ${formatQuantity(qSwitch.opensAt, 'time')}, the pump ends at ${formatQuantity(duration, 'time')}: the last ${formatQuantity(duration - qSwitch.opensAt, 'time')} of pumping add nothing to this pulse and are left out of the prediction.`,
         path: 'q_switch.opens_at',
       },
     ];

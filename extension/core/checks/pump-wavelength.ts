@@ -1,3 +1,4 @@
+import { formatWavelength } from '../quantity/format.ts';
 import type { Check } from './check.ts';
 
 /** A pump photon with less energy than a laser photon. */
@@ -10,8 +11,7 @@ export const pumpWavelength: Check = {
       : [
           {
             severity: 'error',
-            message:
-              'A pump photon must carry more energy than a laser photon: the pump wavelength has to be the shorter one.',
+            message: `The pump wavelength (${formatWavelength(pump.wavelength)}) must be shorter than the laser's (${formatWavelength(medium.wavelength)}): a pump photon has to carry more energy than a laser photon.`,
             path: 'pump.wavelength',
           },
         ],

@@ -10,7 +10,6 @@ import { longPulse } from './long-pulse.ts';
 import { lowReflectivity } from './low-reflectivity.ts';
 import { lowerLevelBottleneck } from './lower-level-bottleneck.ts';
 import { mediumTooLong } from './medium-too-long.ts';
-import { noDissipativeLoss } from './no-dissipative-loss.ts';
 import { noPulse } from './no-pulse.ts';
 import { opensBeforePumpEnd } from './opens-before-pump-end.ts';
 import { pumpWavelength } from './pump-wavelength.ts';
@@ -39,7 +38,6 @@ export const CHECKS: readonly Check[] = [
   mediumTooLong,
   tooManyExcited,
   beamBeyondMedium,
-  noDissipativeLoss,
   lowReflectivity,
   fewRoundTrips,
   longPulse,

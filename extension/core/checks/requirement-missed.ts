@@ -1,6 +1,6 @@
 import type { RequirementFigures } from '../physics/prediction.ts';
-import { formatRequirement } from '../report/requirement-text.ts';
 import type { Check, Finding } from './check.ts';
+import { formatRequirement } from './requirement-text.ts';
 
 /** A predicted figure outside the limits that the design itself sets. */
 export const requirementMissed: Check = {
@@ -19,7 +19,7 @@ function missed(requirement: RequirementFigures): Finding[] {
   return [
     {
       severity: 'error',
-      message: `Predicted ${text(predicted)}, ${below ? 'below the least' : 'above the most'} wanted, ${text(limit)}, by ${text(Math.abs(predicted - limit))}${by}.`,
+      message: `Predicted ${text(predicted)}: ${text(Math.abs(predicted - limit))}${by} ${below ? 'below the minimum' : 'above the maximum'} of ${text(limit)}.`,
       path: `requirements.${name}.${below ? 'min' : 'max'}`,
     },
   ];

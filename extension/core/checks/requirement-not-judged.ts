@@ -11,7 +11,7 @@ export const requirementNotJudged: Check = {
         : [
             {
               severity: 'warning' as const,
-              message: `${name.replaceAll('_', ' ')} is not predicted for this design, so nothing says whether it is met. ${REASON[name] ?? 'Verify it by measurement.'}`,
+              message: `Not judged: there is no prediction of the ${name.replaceAll('_', ' ').replace('hold off', 'hold-off').replace('build up', 'build-up')} here. ${REASON[name] ?? 'This release does not model it: verify it by measurement.'}`,
               path: `requirements.${name}`,
             },
           ],
@@ -19,6 +19,6 @@ export const requirementNotJudged: Check = {
 };
 
 const REASON: Readonly<Record<string, string>> = {
-  hold_off_margin: 'Give `q_switch.closed_loss`.',
-  build_up_time: 'The closed switch does not hold off.',
+  hold_off_margin: 'It needs `q_switch.closed_loss`.',
+  build_up_time: 'The laser starts before the switch opens, so no delay can be given.',
 };

@@ -22,7 +22,7 @@ function otherWavelength({ threshold, path }: Surface, wavelength: number): Find
   return [
     {
       severity: 'warning',
-      message: `The threshold was measured at ${at}, the laser runs at ${formatWavelength(wavelength)}. Thresholds are not scaled across wavelengths: take this margin as a hint only.`,
+      message: `The threshold was measured at ${at}, the laser runs at ${formatWavelength(wavelength)}. Thresholds are not scaled across wavelengths, so this margin is a hint only: ask for one at the laser's own.`,
       path: `${path}.damage_threshold.wavelength`,
     },
   ];
@@ -36,7 +36,7 @@ function otherWidth({ threshold, path }: Surface, width: number): Finding[] {
     return [
       {
         severity: 'warning',
-        message: 'No margin: below 20 ps damage follows other laws, and the threshold is not scaled.',
+        message: `No margin: the threshold is for ${formatQuantity(threshold.pulseWidth, 'time')}, the pulse lasts ${formatQuantity(width, 'time')}. Below 20 ps damage follows other laws, and nothing is scaled.`,
         path: where,
       },
     ];
@@ -45,7 +45,7 @@ function otherWidth({ threshold, path }: Surface, width: number): Finding[] {
   return [
     {
       severity: 'information',
-      message: `The threshold is scaled from ${formatQuantity(threshold.pulseWidth, 'time')} to ${formatQuantity(width, 'time')}: outside 50 ps to 100 ns the scaling is an extrapolation.`,
+      message: `The threshold is scaled from ${formatQuantity(threshold.pulseWidth, 'time')} to ${formatQuantity(width, 'time')}. Outside 50 ps to 100 ns that is an extrapolation: take the margin as rough.`,
       path: where,
     },
   ];

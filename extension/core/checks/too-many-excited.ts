@@ -4,16 +4,16 @@ import type { Check } from './check.ts';
 export const tooManyExcited: Check = {
   code: 'too-many-excited',
   title: 'More ions are excited than there are',
-  run({ module: { medium }, outcome: { train, cavity } }) {
+  run({ module: { medium }, outcome: { train } }) {
     if (medium.ionDensity === undefined) return [];
     const available = medium.ionDensity * medium.length;
-    const onAxis = Math.max(...train.store.ions);
-    if (onAxis <= available) return [];
+    const most = Math.max(...train.store.ions);
+    if (most <= available) return [];
     return [
       {
         severity: 'error',
-        message: `On axis the pump would excite ${(onAxis / available).toPrecision(3)} times the ions that the medium holds along its length. Absorption bleaches long before: lower the pump, widen its beam, or correct the ion density.`,
-        path: cavity.module.pump.power > 0 ? 'pump.beam.radius' : 'gain_medium.ion_density',
+        message: `In the laser mode the pump would excite up to ${(most / available).toPrecision(3)} times the ions that the medium has. Real absorption bleaches before that: widen the pump beam, lower the pump, or correct \`ion_density\`.`,
+        path: 'pump.beam.radius',
       },
     ];
   },

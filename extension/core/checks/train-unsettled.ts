@@ -10,7 +10,7 @@ export const trainUnsettled: Check = {
       ? [
           {
             severity: 'warning',
-            message: `Pulses do not repeat at this rate: openings fail or energies alternate. The figures are those of the largest pulse met; the mean is ${formatQuantity(train.meanEnergy, 'energy')} per opening. Lower the repetition rate or raise the pump.`,
+            message: `Pulses do not repeat at this rate: openings fail, or energies alternate. The figures are those of the largest pulse; the mean is ${formatQuantity(train.meanEnergy, 'energy')} per opening. Lower the repetition rate, raise the pump, or lengthen the gate.`,
             path: 'q_switch.repetition_rate',
           },
         ]

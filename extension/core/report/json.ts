@@ -5,6 +5,8 @@ import { createPositions, positionsOf } from './position.ts';
 export function predictionJson(file: string, text: string, analysis: Analysis): string {
   const positionAt = createPositions(text);
   const { prediction, design, problems } = analysis;
+  // The limits are the file's own, and the figure stands under its own name: name and verdict are enough.
+  const requirements = prediction?.requirements.map(({ name, met }) => ({ name, ...(met !== undefined && { met }) }));
   const title = design.values.title;
   const findings = problems.map(({ code, severity, message, path, range }) => ({
     code,
@@ -13,5 +15,5 @@ export function predictionJson(file: string, text: string, analysis: Analysis): 
     path,
     range: positionsOf(range, positionAt),
   }));
-  return `${JSON.stringify({ file, ...(title !== undefined && { title }), ...prediction, findings }, null, 2)}\n`;
+  return `${JSON.stringify({ file, ...(title !== undefined && { title }), ...prediction, ...(requirements && { requirements }), findings }, null, 2)}\n`;
 }

@@ -17,6 +17,11 @@ export function row(label: string, value: number | string | undefined, third = '
   return [`  ${label.padEnd(LABEL)}${text.padStart(VALUE)}${beside ? `   ${beside}` : ''}`];
 }
 
+/** A text of the file made fit for a terminal: no line breaks, no control characters, no changes of direction. */
+export function oneLine(text: string): string {
+  return text.replace(/[\p{Cc}\p{Zl}\p{Zp}\p{Bidi_Control}\s]+/gu, ' ').trim();
+}
+
 /** Columns under a heading, the first to the left, cut so that a line stays within 80. */
 export function table(heading: readonly string[], rows: readonly (readonly string[])[]): string[] {
   const widths = heading.map((title, i) => Math.max(title.length, ...rows.map((cells) => (cells[i] ?? '').length)));

@@ -5,15 +5,18 @@ import { formatPercent, formatQuantity } from '../quantity/format.ts';
 import { CAUTION } from './caution.ts';
 import { createPositions } from './position.ts';
 import { formatLimits, formatRequirement } from './requirement-text.ts';
-import { row, table, wrapped } from './text-layout.ts';
+import { oneLine, row, table, wrapped } from './text-layout.ts';
 
 /** `giantpulse predict` for people: 80 columns, engineering units, the verdicts last where the eye ends. */
 export function predictionText(file: string, text: string, analysis: Analysis): string {
   const { design, prediction, resolved } = analysis;
-  const head = [design.values.title ?? file, ...(design.values.title === undefined ? [] : [file])];
+  const { title } = design.values;
+  const head = [...(title === undefined ? [] : wrapped(oneLine(title), 0)), file];
   const blocks = [
     head,
-    ...(prediction ? figureBlocks(prediction, analysis) : [['No prediction: the design is incomplete or invalid.']]),
+    ...(prediction
+      ? figureBlocks(prediction, analysis)
+      : [['No prediction: the findings say what stands in the way.']]),
     filledIn(resolved.origins),
     findings(text, analysis),
     CAUTION.split('\n'),
@@ -38,7 +41,7 @@ function figureBlocks(prediction: Prediction, { outcome }: Analysis): string[][]
         ),
         row('build-up time', pulse.build_up_time_s, 'time', 'opening to peak'),
       ]
-    : [row('none', '')];
+    : [['  none']];
   return [
     [`Pulse (${model === 'depletion' ? 'depletion form' : 'time integration'})`, ...pulseRows.flat()],
     [
@@ -63,7 +66,7 @@ function figureBlocks(prediction: Prediction, { outcome }: Analysis): string[][]
 function surfaceTable(surfaces: Prediction['surfaces']): string[] {
   if (surfaces.length === 0) return [];
   const rows = surfaces.map(({ name, peak_fluence_J_per_cm2, threshold_J_per_cm2, margin }) => [
-    name,
+    oneLine(name),
     formatQuantity(peak_fluence_J_per_cm2 * 1e4, 'fluence'),
     threshold_J_per_cm2 === undefined ? 'not scaled' : formatQuantity(threshold_J_per_cm2 * 1e4, 'fluence'),
     margin === undefined ? '' : margin.toPrecision(3),
