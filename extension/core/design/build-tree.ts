@@ -1,4 +1,5 @@
 import { type Document, isAlias, isMap, isNode, isScalar, isSeq, type Node, type Scalar, type YAMLMap } from 'yaml';
+import type { ReadingCode } from './codes.ts';
 import type { Findings } from './finding.ts';
 import { tighten } from './lines.ts';
 import { branchNode, emptyNode, leafNode, type Place, rangeOf, underline } from './make-node.ts';
@@ -60,7 +61,7 @@ function keepAnchor(walk: Walk, node: Node & { anchor?: string | undefined }, pl
 
 /** Counts a node against the bounds; one problem where one is reached. */
 function admits(walk: Walk, node: Node, place: Place): boolean {
-  let refusal: [code: string, message: string] | undefined;
+  let refusal: [code: ReadingCode, message: string] | undefined;
   if (place.expanding && ++walk.expanded > MAX_EXPANDED) {
     refusal = ['alias-expansion', `Aliases expand to more than ${MAX_EXPANDED} values; the rest is not read.`];
   } else if (++walk.nodes > MAX_NODES) {

@@ -16,6 +16,13 @@ export const READING_CODES = [
   { code: 'missing-value', title: 'A key has no value' },
   { code: 'wrong-type', title: 'A value is of the wrong kind' },
   { code: 'not-allowed', title: 'A value is not one of those allowed' },
+  { code: 'not-a-quantity', title: 'A value is not a number with a unit' },
+  { code: 'missing-unit', title: 'A number has no unit' },
+  { code: 'unknown-unit', title: 'A unit is not known' },
+  { code: 'ambiguous-unit', title: 'A unit can be read in two ways' },
+  { code: 'wrong-dimension', title: 'A unit measures something else' },
+  { code: 'bad-tolerance', title: 'A tolerance cannot be read' },
+  { code: 'not-finite', title: 'A number is not finite, or too small to be told from zero' },
   { code: 'out-of-range', title: 'A value is outside what can be' },
   { code: 'unusual-value', title: 'A value is outside what is usual' },
 ] as const;

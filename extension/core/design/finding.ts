@@ -3,7 +3,9 @@ import type { ReadingCode } from './codes.ts';
 
 /** Collects problems up to a bound, so that noise neither floods the reader nor costs more than it tells. */
 export interface Findings {
-  add(code: string, path: string, range: TextRange, message: string, more?: FindingDetail): void;
+  add(code: ReadingCode, path: string, range: TextRange, message: string, more?: FindingDetail): void;
+  /** No more are kept, so what comes need not be looked into closely. */
+  isFull(): boolean;
   /** From now on nothing that begins in this range is added; ranges come in the order of the text. */
   mute(range: TextRange): void;
   /** In the order of the text, at most `limit` and one note. */
@@ -24,8 +26,8 @@ export function createFindings(): Findings {
   let dropped = 0;
   return {
     add(code, path, range, message, more) {
-      // An anchor used in three places is wrong once.
-      const identity = `${code} ${range.start} ${range.end} ${message}`;
+      // An anchor used in three places is wrong once, whereas several keys can be missing in one place.
+      const identity = `${code} ${range.start} ${range.end} ${code === 'missing-key' ? message : ''}`;
       if (kept.has(identity) || isWithin(muted, range.start)) return;
       if (kept.size >= MAX_PROBLEMS) {
         dropped++;
@@ -35,6 +37,7 @@ export function createFindings(): Findings {
       const fixes = more?.fixes;
       kept.set(identity, { code, severity, message, path, range, ...(fixes?.length ? { fixes } : {}) });
     },
+    isFull: () => kept.size >= MAX_PROBLEMS,
     mute(range) {
       muted.push(range);
     },

@@ -33,6 +33,12 @@ export function nextWord(text: string, from: number): TextRange {
   return start < text.length ? lineAt(text, start) : tighten(text, from, from + 1);
 }
 
+/** A line's range without the comment at its end. */
+export function withoutNote(text: string, line: TextRange): TextRange {
+  const code = text.slice(line.start, Math.min(line.end, line.start + 1000)).split(/\s+#/)[0] ?? '';
+  return { start: line.start, end: Math.min(line.end, line.start + Math.max(1, code.length)) };
+}
+
 function isBreak(text: string, at: number): boolean {
   const code = text.charCodeAt(at);
   return code === 10 || code === 13;

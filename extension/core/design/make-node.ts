@@ -1,6 +1,6 @@
 import type { Node, Scalar } from 'yaml';
 import type { TextRange } from '../report/problem.ts';
-import { tighten } from './lines.ts';
+import { tighten, withoutNote } from './lines.ts';
 import type { TreeNode } from './tree.ts';
 
 const LONGEST_UNDERLINE = 200;
@@ -84,7 +84,7 @@ export function underline(text: string, node: Node, place: Place): TextRange {
   const shown = place.alias ?? place.key;
   if (shown !== undefined) return shown;
   const { start, end } = rangeOf(node);
-  return tighten(text, start, Math.min(end, start + LONGEST_UNDERLINE));
+  return withoutNote(text, tighten(text, start, Math.min(end, start + LONGEST_UNDERLINE)));
 }
 
 export function rangeOf(node: Node): TextRange {

@@ -49,7 +49,13 @@ function readOne(node: TreeNode, schema: QuantitySchema, findings: Findings): Qu
   if ('problem' in read) {
     const { code, message, range, fixes } = read.problem;
     const mended = node.textStart === undefined ? [] : fixes.map((fix) => ({ ...fix, range: inFile(node, fix.range) }));
-    findings.add(code, node.path, inFile(node, range), `${placeName(node.path)}: ${message}.`, { fixes: mended });
+    findings.add(
+      code,
+      node.path,
+      inFile(node, range),
+      `${placeName(node.path)}: ${message}${message.endsWith('?') ? '' : '.'}`,
+      { fixes: mended },
+    );
     return undefined;
   }
   const { quantity } = read;

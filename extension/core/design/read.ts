@@ -4,7 +4,7 @@ import { buildTree } from './build-tree.ts';
 import { createFindings, type Findings } from './finding.ts';
 import type { GainModuleFile } from './generated/gain-module.ts';
 import { GAIN_MODULE_SCHEMA } from './generated/schema.ts';
-import { lineAt } from './lines.ts';
+import { lineAt, withoutNote } from './lines.ts';
 import { readValue } from './read-values.ts';
 import { keySchema, type SchemaNode } from './schema.ts';
 import { checkStructure } from './structure.ts';
@@ -51,7 +51,7 @@ export function readDesign(text: string): ReadDesign {
       const node = find(outer);
       if (node !== undefined) return node.key ?? node.value;
     }
-    return lineAt(text, 0);
+    return withoutNote(text, lineAt(text, 0));
   };
   return {
     values,

@@ -1,6 +1,6 @@
 import type { ErrorCode, YAMLError } from 'yaml';
 import type { Fix, TextRange } from '../report/problem.ts';
-import { lineAt, nextWord, tighten } from './lines.ts';
+import { lineAt, nextWord, tighten, withoutNote } from './lines.ts';
 
 /** A fault of the YAML text in words that need no YAML standard beside them. */
 export interface SyntaxFault {
@@ -102,10 +102,4 @@ function explainMissing(text: string, range: TextRange, original: string): Synta
   if (/white space/.test(original)) return { range, message: 'A space is missing before this.', fixes: [] };
   const between = /Missing (,|, or :) between/.test(original) ? 'A comma is missing before this.' : undefined;
   return { range, message: between ?? 'A mark is missing here: a `:` with a space behind it, or a comma.', fixes: [] };
-}
-
-/** A line's range without the comment at its end. */
-function withoutNote(text: string, line: TextRange): TextRange {
-  const code = text.slice(line.start, Math.min(line.end, line.start + 1000)).split(/\s+#/)[0] ?? '';
-  return { start: line.start, end: line.start + Math.max(1, code.length) };
 }

@@ -14,6 +14,10 @@ export function reportUnknownKey(
 ): string | undefined {
   const child = node.entries?.get(name);
   if (child?.key === undefined || schema?.kind !== 'section') return undefined;
+  if (findings.isFull()) {
+    findings.add('unknown-key', child.path, child.key, clip(name));
+    return undefined;
+  }
   const known = Object.keys(schema.keys);
   const free = known.filter((key) => !node.entries?.has(key));
   const what = `\`${clip(name)}\` is not a key of ${node.path === '' ? 'a design' : placeName(node.path)}`;

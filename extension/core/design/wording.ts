@@ -32,7 +32,8 @@ export function describeWrongType(node: TreeNode, schema: SchemaNode, required: 
   if (node.kind === 'null')
     return `${name} has no value. Give ${wanted(schema)}${required ? '' : ', or remove the key'}.`;
   const found = node.kind === 'map' ? 'a section' : node.kind === 'list' ? 'a list' : `\`${clip(node.text ?? '')}\``;
-  return `${name} takes ${wanted(schema)}, not ${found}.`;
+  const quoted = schema.kind === 'count' && typeof node.data === 'string' && /^\d+$/.test(node.data);
+  return `${name} takes ${wanted(schema)}, not ${found}${quoted ? ' in quotes' : ''}.`;
 }
 
 function wanted(schema: SchemaNode): string {
@@ -51,6 +52,6 @@ function wanted(schema: SchemaNode): string {
     case 'text':
       return example === undefined ? 'text' : `text such as \`${example}\``;
     case 'count':
-      return `a whole number such as \`${example ?? schema.least}\`, without quotes`;
+      return `a whole number such as \`${example ?? schema.least}\``;
   }
 }

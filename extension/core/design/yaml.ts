@@ -1,8 +1,8 @@
-import { Composer, type Document, type YAMLError } from 'yaml';
+import { Composer, type Document, isScalar, type YAMLError } from 'yaml';
 import type { Findings } from './finding.ts';
 import { lineAt } from './lines.ts';
 import { explainSyntax, type SyntaxFault } from './syntax.ts';
-import { firstDocument, MAX_DEPTH, prepareTokens, type Unclosed } from './tokens.ts';
+import { firstDocument, MAX_DEPTH, MAX_ESCAPES, prepareTokens, type Unclosed } from './tokens.ts';
 
 /** The longest text that is read, in UTF-16 units; a design of 300 lines has 15,000. */
 export const MAX_CHARACTERS = 2_000_000;
@@ -17,14 +17,18 @@ export interface ParsedYaml {
 export function parseYaml(text: string, findings: Findings): ParsedYaml | undefined {
   if (!isReadable(text, findings)) return undefined;
   const { tokens, complete } = firstDocument(text, findings);
-  const { tooDeep, unclosed } = prepareTokens(tokens);
+  const { tooDeep, escaped, unclosed } = prepareTokens(tokens);
   if (tooDeep !== undefined) {
     const message = `More than ${MAX_DEPTH} levels deep: a design needs five.`;
     findings.add('nested-too-deep', '', { start: tooDeep, end: tooDeep + 1 }, message);
   }
+  if (escaped !== undefined) {
+    const message = `More than ${MAX_ESCAPES} backslashes in quoted text: this value is not read.`;
+    findings.add('file-too-large', '', { start: escaped, end: escaped + 1 }, message);
+  }
   const composer = new Composer({ version: '1.2', uniqueKeys: false, prettyErrors: false, logLevel: 'silent' });
   const [document] = [...composer.compose(tokens, true, text.length)];
-  if (document === undefined || 'empty' in document || document.contents === null) {
+  if (document === undefined || 'empty' in document || (document.errors.length === 0 && isBlank(document))) {
     reportEmpty(findings);
     return undefined;
   }
@@ -33,6 +37,10 @@ export function parseYaml(text: string, findings: Findings): ParsedYaml | undefi
   );
   reportSyntax(text, faults, unclosed, findings);
   return { document, partial: !complete || faults.length > 0 };
+}
+
+function isBlank({ contents }: Document.Parsed): boolean {
+  return contents === null || (isScalar(contents) && contents.source === '' && contents.type === 'PLAIN');
 }
 
 function isReadable(text: string, findings: Findings): boolean {

@@ -492,8 +492,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
        "value": 0.001
       },
       "high": {
-       "text": "1 MW",
-       "value": 1000000
+       "text": "100 MW",
+       "value": 100000000
       }
      }
     },
@@ -688,8 +688,8 @@ export const GAIN_MODULE_SCHEMA: SectionSchema = {
      ],
      "usual": {
       "low": {
-       "text": "100 ns",
-       "value": 1e-7
+       "text": "1 ns",
+       "value": 1e-9
       },
       "high": {
        "text": "50 ms",
@@ -2450,19 +2450,19 @@ export const CONDITIONS: Readonly<Record<string, Condition>> = {
   "blame": "kind"
  },
  "#/properties/q_switch/allOf/2/then/properties/closed_loss": {
-  "because": "a saturable absorber or no switch at all is not driven: only an active switch has this",
+  "because": "only a driven switch has this",
   "blame": "kind"
  },
  "#/properties/q_switch/allOf/2/then/properties/opening_time": {
-  "because": "a saturable absorber or no switch at all is not driven: only an active switch has this",
+  "because": "only a driven switch has this",
   "blame": "kind"
  },
  "#/properties/q_switch/allOf/2/then/properties/opens_at": {
-  "because": "a saturable absorber or no switch at all is not driven: only an active switch has this",
+  "because": "only a driven switch has this",
   "blame": "kind"
  },
  "#/properties/q_switch/allOf/2/then/properties/gate": {
-  "because": "a saturable absorber or no switch at all is not driven: only an active switch has this",
+  "because": "only a driven switch has this",
   "blame": "kind"
  }
 };
