@@ -1,6 +1,6 @@
 import type { RequirementFigures } from '../physics/prediction.ts';
+import { formatRequirement } from '../report/requirement-text.ts';
 import type { Check, Finding } from './check.ts';
-import { formatRequirement } from './requirement-text.ts';
 
 /** A predicted figure outside the limits that the design itself sets. */
 export const requirementMissed: Check = {
