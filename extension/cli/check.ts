@@ -8,12 +8,12 @@ import type { World } from './world.ts';
 /** Prints the findings of all designs named. 0 without errors, 1 with errors, 2 could not run. */
 export async function check(args: readonly string[], world: World): Promise<number> {
   const designs = await designFiles(args, world);
-  if ('missing' in designs) {
-    world.err(`giantpulse: no such file or folder: ${designs.missing}\n`);
+  if ('refusal' in designs) {
+    world.err(`giantpulse: ${designs.refusal}\n`);
     return 2;
   }
   if (designs.files.length === 0) {
-    world.err(`giantpulse: no *.gainmodule.yaml below ${args.join(', ')}\n`);
+    world.err(`giantpulse: no *.gainmodule.yaml in ${args.join(', ')}\n`);
     return 2;
   }
   const all: Problem[] = [];

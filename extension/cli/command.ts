@@ -18,7 +18,7 @@ export async function runCommand(args: readonly string[], world: World): Promise
     .exitOverride()
     .addHelpText(
       'after',
-      '\nExit codes: 0 fine (predict: a pulse), 1 errors found (predict: no pulse), 2 could not run.\nPredictions are no measurements and no interlock; the laser safety officer decides.',
+      '\nExit codes: 0 fine (predict: a pulse), 1 errors found (predict: no pulse),\n2 could not run.\n\nPredictions are no measurements and no interlock; local codes, the laser safety\nofficer and licensed practice decide.',
     );
   program
     .command('predict')

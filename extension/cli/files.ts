@@ -1,7 +1,7 @@
 import type { World } from './world.ts';
 
-/** The designs that arguments name, or the first argument that names none. */
-export type Designs = { readonly files: readonly string[] } | { readonly missing: string };
+/** The designs that arguments name, or what is wrong with the first argument that names none. */
+export type Designs = { readonly files: readonly string[] } | { readonly refusal: string };
 
 const PATTERN = /[*?[\]{}!]/;
 
@@ -17,9 +17,9 @@ export async function designFiles(args: readonly string[], world: World): Promis
       for (const file of await world.find([`${literal}/**/*.gainmodule.{yaml,yml}`])) files.add(file);
     } else if (PATTERN.test(arg)) {
       const found = await world.find([arg.replaceAll('\\', '/')]);
-      if (found.length === 0) return { missing: arg };
+      if (found.length === 0) return { refusal: `nothing matches ${arg}` };
       for (const file of found) files.add(file);
-    } else return { missing: arg };
+    } else return { refusal: `no such file or folder: ${arg}` };
   }
   return { files: [...files] };
 }

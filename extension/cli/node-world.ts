@@ -10,9 +10,14 @@ export function nodeWorld(): World {
   return {
     version: manifest.version,
     kindOf(path) {
-      const stat = statSync(path, { throwIfNoEntry: false });
-      if (stat === undefined) return 'nothing';
-      return stat.isDirectory() ? 'folder' : 'file';
+      try {
+        const stat = statSync(path, { throwIfNoEntry: false });
+        if (stat === undefined) return 'nothing';
+        return stat.isDirectory() ? 'folder' : 'file';
+      } catch {
+        // Something is there that can't be looked at; reading it will say why.
+        return 'file';
+      }
     },
     read(path) {
       const file = openSync(path, 'r');

@@ -2,8 +2,11 @@ import type { World } from './world.ts';
 
 /** A file's text, or undefined with the reason on stderr. */
 export function readOrTell(file: string, world: World): string | undefined {
-  if (world.kindOf(file) !== 'file') {
-    world.err(`giantpulse: no such file: ${file}\n`);
+  const kind = world.kindOf(file);
+  if (kind !== 'file') {
+    world.err(
+      kind === 'folder' ? `giantpulse: a folder, not a design: ${file}\n` : `giantpulse: no such file: ${file}\n`,
+    );
     return undefined;
   }
   try {
