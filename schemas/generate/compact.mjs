@@ -1,4 +1,5 @@
 // The schema as a table for reading, hovers and completion: references resolved, bounds in SI.
+import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
 
 const LIMITS = { 'x-above': 'above', 'x-at-least': 'at least', 'x-below': 'below', 'x-at-most': 'at most' };
@@ -91,7 +92,7 @@ function collectConditions(node, pointer, blame, found) {
 
 async function loadReader() {
   const bundle = await build({
-    entryPoints: [new URL('../../extension/core/quantity/quantity.ts', import.meta.url).pathname],
+    entryPoints: [fileURLToPath(new URL('../../extension/core/quantity/quantity.ts', import.meta.url))],
     bundle: true,
     format: 'esm',
     write: false,
