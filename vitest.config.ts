@@ -1,5 +1,5 @@
 import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
-  test: { include: ['test/**/*.test.ts'], exclude: ['test/host/**', 'node_modules/**'], testTimeout: 120_000 },
+  test: { include: ['test/**/*.test.ts'], exclude: ['test/host/**', 'node_modules/**'], testTimeout: 400_000 },
 });

@@ -5,7 +5,7 @@ import { fire } from './fire.ts';
 import type { GainModule } from './gain-module.ts';
 import type { CouplingFigures, Prediction, PulseFigures, StateFigures, TrainFigures } from './prediction.ts';
 import { judgeRequirements, type Requirement } from './requirements.ts';
-import { type Train, trainOf } from './train.ts';
+import { settledPulse, type Train, trainOf } from './train.ts';
 
 /** A prediction and what it was worked out from. */
 export interface Outcome {
@@ -52,7 +52,7 @@ function coupling(cavity: Cavity, train: Train): CouplingFigures {
   if (train.settled?.model !== 'time_integration') return figures;
   return optimumByTrial((outputLog) => {
     const trial = { ...cavity, outputLog, loss: outputLog + cavity.dissipativeLog };
-    const fired = cavity.module.pump.kind === 'continuous' ? trainOf(trial).settled : fire(trial, train.store);
+    const fired = cavity.module.pump.kind === 'continuous' ? settledPulse(trial) : fire(trial, train.store);
     return fired?.energy ?? 0;
   }, figures);
 }

@@ -16,6 +16,8 @@ export interface Train {
   readonly unheldGain?: number;
   /** Openings fail or pulses alternate instead of settling; `settled` is then the largest pulse met. */
   readonly unsettled: boolean;
+  /** Openings followed, at most 240, and integration steps that they took, about 20,000 at most. */
+  readonly work: { readonly openings: number; readonly steps: number };
   /** What the optimum coupling is judged by: the store given for a pulsed pump, the balance for a continuous one. */
   readonly balance: Balance;
 }
@@ -34,12 +36,11 @@ const APPROACHES = 8;
 
 /** Follows openings until they repeat. An opening that fails carries its inversion over. */
 export function trainOf(cavity: Cavity): Train {
-  const { qSwitch, medium, pump } = cavity.module;
+  const { pump } = cavity.module;
   const schedule = scheduleOf(cavity);
   const limit = cavity.loss + cavity.closedLog;
-  const lost = -Math.expm1(-1 / (qSwitch.repetitionRate * medium.upperLevelLifetime));
-  const start = { ...schedule, idle: 0 };
-  const balance = balanceOf(cavity, refill(cavity, emptyStore(cavity), start), lost);
+  const lost = lostInPeriod(cavity);
+  const balance = trainBalance(cavity, schedule, lost);
   let unheldGain = 0;
   const fill = (left: Store, over: Schedule) => {
     const store = refill(cavity, left, over, limit);
@@ -57,6 +58,22 @@ export function trainOf(cavity: Cavity): Train {
     ...(unheldGain > 0 && { unheldGain }),
     balance: pump.kind === 'continuous' ? balance : singleShot(cavity, run.store),
   };
+}
+
+/** The pulse that a train settles to, found without following it; undefined where none lasts. */
+export function settledPulse(cavity: Cavity): Firing | undefined {
+  if (cavity.module.medium.lowerLevelLifetime !== undefined) return trainOf(cavity).settled;
+  const balance = trainBalance(cavity, scheduleOf(cavity), lostInPeriod(cavity));
+  return balanced(cavity, balance, cavity.loss + cavity.closedLog)?.settled;
+}
+
+function trainBalance(cavity: Cavity, schedule: Schedule, lost: number): Balance {
+  return balanceOf(cavity, refill(cavity, emptyStore(cavity), { ...schedule, idle: 0 }), lost);
+}
+
+/** The part of the upper-level ions that decays from one opening to the next. */
+function lostInPeriod({ module: { qSwitch, medium } }: Cavity): number {
+  return -Math.expm1(-1 / (qSwitch.repetitionRate * medium.upperLevelLifetime));
 }
 
 function follow(
@@ -79,27 +96,34 @@ function follow(
   for (let opening = 0; opening < MOST_OPENINGS && steps < MOST_STEPS; opening++) {
     if (!(roundTripGain(cavity, store.ions) > cavity.loss)) {
       const waited = untilThreshold(cavity, store, idle, lost);
-      if (waited === undefined) return { store: idle, ...ended(first, undefined, 0, false) };
+      if (waited === undefined)
+        return { store: idle, ...ended(first, undefined, 0, false), work: { openings: opening, steps } };
       store = waited;
     }
     const fired = fire(cavity, store);
     first ??= fired;
     steps += fired?.steps ?? 0;
+    const work = { openings: opening + 1, steps };
     if (fired && fired.energy >= (largest?.settled.energy ?? 0)) largest = { store, settled: fired };
     energies.push(fired?.energy ?? 0);
     const next = fill(fired?.after ?? store, schedule);
     const gain = roundTripGain(cavity, store.ions);
     const nextGain = roundTripGain(cavity, next.ions);
     const near = fired?.model === 'time_integration' ? SETTLED_INTEGRATED : SETTLED;
-    if (Math.abs(nextGain - gain) <= near * gain) return { store, ...ended(first, fired, fired?.energy ?? 0, false) };
+    if (Math.abs(nextGain - gain) <= near * gain)
+      return { store, ...ended(first, fired, fired?.energy ?? 0, false), work };
     approaches = fired && Math.abs(nextGain - goalGain) < Math.abs(gain - goalGain) ? approaches + 1 : 0;
     if (goal && approaches >= APPROACHES)
-      return { store: goal.store, ...ended(first, goal.settled, goal.settled.energy, false) };
+      return { store: goal.store, ...ended(first, goal.settled, goal.settled.energy, false), work };
     store = next;
   }
   const tail = energies.slice(-MEAN_OVER);
   const mean = tail.reduce((sum, energy) => sum + energy, 0) / tail.length;
-  return { store: largest?.store ?? store, ...ended(first, largest?.settled, mean, true) };
+  return {
+    store: largest?.store ?? store,
+    ...ended(first, largest?.settled, mean, true),
+    work: { openings: energies.length, steps },
+  };
 }
 
 /** A store and the pulse that comes of it. */
