@@ -12,6 +12,11 @@ export function element<K extends keyof HTMLElementTagNameMap>(
   return made;
 }
 
+/** A message's words, what stands between backticks set as code. */
+export function prose(text: string): readonly (Node | string)[] {
+  return text.split('`').map((part, index) => (index % 2 === 0 ? part : element('code', {}, part)));
+}
+
 /** A part of the page under its heading; `body` is what a new state replaces. */
 export function section(id: string, heading: string): { readonly root: HTMLElement; readonly body: HTMLElement } {
   const title = element('h2', { id: `${id}-heading` }, heading);
@@ -25,7 +30,18 @@ export interface Column {
   readonly numeric?: boolean;
 }
 
-export function table(caption: string, columns: readonly Column[], rows: readonly (readonly Child[])[]): HTMLElement {
+/** A table in a box that scrolls where the page is too small for it, by keyboard as well. */
+export function scrolling(
+  caption: string,
+  columns: readonly Column[],
+  rows: readonly (readonly Child[])[],
+  boxClass = 'sideways',
+): HTMLElement {
+  const box = { class: boxClass, role: 'region', tabindex: '0', 'aria-label': caption };
+  return element('div', box, table(caption, columns, rows));
+}
+
+function table(caption: string, columns: readonly Column[], rows: readonly (readonly Child[])[]): HTMLElement {
   const classOf = (index: number): Readonly<Record<string, string>> =>
     columns[index]?.numeric === true ? { class: 'number' } : {};
   const head = columns.map(({ heading }, index) => element('th', { scope: 'col', ...classOf(index) }, heading));

@@ -1,5 +1,5 @@
 import type { ReadoutState } from '../extension/protocol/readout.ts';
-import { element, section } from './dom.ts';
+import { element, prose, section } from './dom.ts';
 import { cautionFoot } from './parts/caution.ts';
 import { groups, headline } from './parts/figures.ts';
 import { countOf, problemList } from './parts/problems.ts';
@@ -21,6 +21,7 @@ export interface View {
 /** Builds the page once; a new state replaces the bodies of its parts, so that nothing jumps or loses the focus. */
 export function createView(root: HTMLElement, tableShown: boolean, actions: ViewActions): View {
   let shown: ReadoutState | undefined;
+  let announced: string | undefined;
   const title = element('h1', {}, 'Pulse readout');
   const model = element('p', { class: 'model' });
   const copy = button({ label: 'Copy figures', onPress: () => shown !== undefined && actions.copy(shown) });
@@ -41,7 +42,9 @@ export function createView(root: HTMLElement, tableShown: boolean, actions: View
   };
   const announce = (text: string | undefined): void => {
     notice.hidden = text === undefined;
-    if (notice.textContent !== (text ?? '')) notice.textContent = text ?? '';
+    // Spoken by screen readers whenever it is set: only when it has changed.
+    if (announced !== text) notice.replaceChildren(...prose(text ?? ''));
+    announced = text;
   };
 
   root.replaceChildren(
@@ -76,5 +79,5 @@ export function createView(root: HTMLElement, tableShown: boolean, actions: View
 }
 
 function notes(validity: readonly string[]): HTMLElement {
-  return element('ul', { class: 'notes' }, ...validity.map((note) => element('li', {}, note)));
+  return element('ul', { class: 'notes' }, ...validity.map((note) => element('li', {}, ...prose(note))));
 }

@@ -24,7 +24,7 @@ export function readout(analysis: Analysis, subject: ReadoutSubject): ReadoutSta
   return {
     ...shell(subject, titleOf(analysis.design) ?? fileName(subject.uri)),
     headline: headlineFigures(prediction),
-    problems: problems.map((problem) => problemRow(problem, subject)),
+    problems: problems.filter(isNoValidityNote(analysis)).map((problem) => problemRow(problem, subject)),
     ...(prediction === undefined
       ? {}
       : {
@@ -61,6 +61,12 @@ function fileName(uri: string): string {
   } catch {
     return name;
   }
+}
+
+/** Validity notes have a place of their own on the page. */
+function isNoValidityNote({ prediction }: Analysis): (problem: Problem) => boolean {
+  const notes = new Set(prediction?.validity.map(({ code, message }) => `${code} ${message}`));
+  return ({ code, message }) => !notes.has(`${code} ${message}`);
 }
 
 function problemRow({ severity, code, message, range }: Problem, { lineOf }: ReadoutSubject): ProblemRow {

@@ -25,7 +25,7 @@ export async function restored(page) {
 
 /** The entry of the open quick pick with exactly this label: the list is not sorted best first, so Enter may take another. */
 export function quickPick(page, label) {
-  const exact = new RegExp(`^\\s*${label.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&')}\\s*$`);
+  const exact = new RegExp(`^\\s*${escaped(label)}\\s*$`);
   return page
     .locator('.quick-input-list .monaco-list-row')
     .filter({ has: page.locator('.label-name', { hasText: exact }) })
@@ -44,8 +44,12 @@ export function webview(page) {
   return page.frameLocator(outer).frameLocator('iframe#active-frame');
 }
 
-/** A word in the editor's text, on the first line that holds `line`. */
+/** A token in the editor's text, on the first line that holds `line`; the editor draws its blanks as no-break spaces. */
 export function word(page, line, text) {
-  const exact = new RegExp(`^\\s*${text.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&')}\\s*$`);
+  const exact = new RegExp(`^\\s*${escaped(text).replaceAll(' ', '\\s')}\\s*$`);
   return page.locator('.view-line', { hasText: line }).first().locator('span', { hasText: exact }).last();
+}
+
+function escaped(text) {
+  return text.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&');
 }

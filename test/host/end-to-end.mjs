@@ -162,11 +162,13 @@ const cases = {
   },
 
   async 'a reloaded window shows the readout again, its table still open'() {
-    // The workbench saves its layout with a delay.
-    await page.waitForTimeout(1500);
+    // In a browser the workbench saves its windows every 5 s: nothing asynchronous can be done when the page goes.
+    await page.waitForTimeout(8000);
     // Without a file to open in its address, which would keep the window from restoring its editors.
     await page.goto(workbench.url());
     await restored(page);
+    await readout.locator('.headline').waitFor();
+    await openFile('transmitter.gainmodule.yaml');
     await reading('Pulse energy')
       .filter({ hasText: /13\.\d mJ/ })
       .waitFor();

@@ -1,5 +1,5 @@
 import type { ProblemRow } from '../../extension/protocol/readout.ts';
-import { element } from '../dom.ts';
+import { element, prose } from '../dom.ts';
 
 const severities = ['error', 'warning', 'information'] as const;
 const marks: Readonly<Record<ProblemRow['severity'], string>> = { error: '✗', warning: '!', information: 'i' };
@@ -25,7 +25,7 @@ export function problemList(problems: readonly ProblemRow[], reveal: (line: numb
       { class: severity },
       element('span', { class: 'mark', 'aria-hidden': 'true' }, marks[severity]),
       element('span', { class: 'unseen' }, `${severity}: `),
-      element('span', {}, message, ' ', element('code', {}, code), ' ', link),
+      element('span', {}, ...prose(message), ' ', element('code', { class: 'code' }, code), ' ', link),
     );
   });
   return element('ul', { class: 'problems' }, ...items);

@@ -1,5 +1,5 @@
 import type { RequirementRow, SurfaceRow, Verdict } from '../../extension/protocol/readout.ts';
-import { element, table } from '../dom.ts';
+import { element, scrolling } from '../dom.ts';
 
 const absent = '—';
 const marks: Readonly<Record<Verdict, string>> = { good: '✓', look: '!', bad: '✗', unknown: '?' };
@@ -22,7 +22,7 @@ export function surfaceTable(rows: readonly SurfaceRow[]): HTMLElement {
     { heading: 'Margin', numeric: true },
     { heading: 'Verdict' },
   ];
-  return table(
+  return scrolling(
     'Peak fluence on each surface against its damage threshold, scaled to this pulse',
     columns,
     rows.map(({ name, fluence, threshold, margin, verdict }) => [
@@ -42,7 +42,7 @@ export function requirementTable(rows: readonly RequirementRow[]): HTMLElement {
     { heading: 'Predicted', numeric: true },
     { heading: 'Verdict' },
   ];
-  return table(
+  return scrolling(
     'Each requirement against the prediction',
     columns,
     rows.map(({ name, required, predicted, verdict }) => [

@@ -108,7 +108,7 @@ function axis(title: string, theme: ChartTheme) {
   return {
     type: 'linear' as const,
     title: { display: true, text: title, color: theme.text, font: { family: theme.font, size: 12 } },
-    ticks: { color: theme.text, maxTicksLimit: 7, font: { family: theme.font, size: 11 } },
+    ticks: { color: theme.text, maxTicksLimit: 7, includeBounds: false, font: { family: theme.font, size: 11 } },
     grid: { color: theme.grid },
     border: { color: theme.text },
   };

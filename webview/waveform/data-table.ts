@@ -1,5 +1,5 @@
 import type { WaveformChart } from '../../extension/protocol/readout.ts';
-import { element, table } from '../dom.ts';
+import { scrolling } from '../dom.ts';
 
 /** Rows in the table: enough to follow the pulse, few enough to read. */
 const rowsWanted = 60;
@@ -20,11 +20,7 @@ export function dataTable(waveform: WaveformChart): HTMLElement {
     { heading: 'Inversion', numeric: true },
   ];
   const label = 'Waveform data: time from the peak, output power, inversion';
-  return element(
-    'div',
-    { class: 'scroll', role: 'region', tabindex: '0', 'aria-label': label },
-    table(label, columns, rows),
-  );
+  return scrolling(label, columns, rows, 'scroll');
 }
 
 function digits(value: number | undefined): string {

@@ -23,7 +23,8 @@ export function chartTheme(): ChartTheme {
   const text = colour(['--vscode-foreground'], style.color);
   return {
     text,
-    grid: colour(highContrast ? ['--vscode-contrastBorder'] : ['--vscode-editorIndentGuide-background1'], text),
+    // Faint on any ground: the theme's own borders shout over the curves in high contrast and vanish in light themes.
+    grid: 'rgba(128, 128, 128, 0.3)',
     power: highContrast ? text : colour(['--vscode-charts-blue'], text),
     inversion: colour(['--vscode-charts-yellow'], text),
     surface: colour(['--vscode-editorHoverWidget-background', '--vscode-editor-background'], 'Canvas'),
