@@ -1,6 +1,6 @@
 // Bundles everything that is shipped into dist/: nothing is installed or loaded from node_modules at run time.
 // `--silent` prints nothing on success; a failing bundle ends with exit code 1.
-import { chmodSync, existsSync, statSync } from 'node:fs';
+import { chmodSync, statSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
@@ -34,19 +34,18 @@ const bundles = [
   { ...node, entryPoints: ['extension/server/main.ts'], outfile: 'dist/server.cjs' },
   { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },
   { ...page, entryPoints: ['webview/readout.ts', 'webview/readout.css'], outdir: 'dist' },
-].filter(({ entryPoints }) => entryPoints.every((entry) => existsSync(join(root, entry))));
+];
 
 try {
   await Promise.all(bundles.map((options) => build(options)));
-  if (existsSync(join(root, 'dist/giantpulse.cjs'))) chmodSync(join(root, 'dist/giantpulse.cjs'), 0o755);
+  chmodSync(join(root, 'dist/giantpulse.cjs'), 0o755);
 } catch {
   // esbuild has already said what is wrong and where.
   process.exit(1);
 }
 if (!silent) {
   for (const file of ['giantpulse.cjs', 'server.cjs', 'extension.cjs', 'readout.js', 'readout.css']) {
-    const path = join(root, 'dist', file);
-    if (existsSync(path))
-      console.log(`dist/${file.padEnd(16)} ${(statSync(path).size / 1000).toFixed(1).padStart(7)} kB`);
+    const kilobytes = statSync(join(root, 'dist', file)).size / 1000;
+    console.log(`dist/${file.padEnd(16)} ${kilobytes.toFixed(1).padStart(7)} kB`);
   }
 }

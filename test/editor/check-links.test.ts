@@ -3,13 +3,21 @@ import { expect, test } from 'vitest';
 import { PROBLEM_CODES } from '../../extension/core/checks/codes.ts';
 import { anchorLines } from '../../extension/editor/check-links.ts';
 
-test('a section is found by its heading, the first of two, and no other line counts', () => {
-  const lines = anchorLines(
-    '# Checks\n\n## hold-off\r\ntext\n### `missing-unit`\nhold-off\n## hold-off\n## Two words\n',
-  );
-  expect(lines.get('hold-off')).toBe(3);
-  expect(lines.get('missing-unit')).toBe(5);
-  expect(lines.has('Two words')).toBe(false);
+test('a section is found by its heading or anchor, the first of two, and no other line counts', () => {
+  const markdown = [
+    '# Checks',
+    '## hold-off: the switch does not hold off\r',
+    'missing-unit',
+    '### `missing-unit`',
+    '<a id="no-pulse"></a>',
+    '## hold-off',
+    '## two words',
+  ];
+  expect([...anchorLines(markdown.join('\n'))]).toEqual([
+    ['hold-off', 2],
+    ['missing-unit', 4],
+    ['no-pulse', 5],
+  ]);
 });
 
 test('every problem that can be raised has a line to link to in the shipped explanation', () => {

@@ -55,7 +55,8 @@ async function chooseTheme(label, bodyClass) {
   await page.locator('.quick-input-widget input[type="text"]').fill(label);
   await quickPick(page, label).click();
   await readout.locator(`body.${bodyClass}`).waitFor();
-  await page.waitForTimeout(500);
+  await page.mouse.move(5, 5);
+  await page.waitForTimeout(700);
 }
 
 const cases = {
@@ -117,6 +118,7 @@ const cases = {
     await readout.locator('.caution').scrollIntoViewIfNeeded();
     await shot('9-readout-foot-high-contrast');
     await chooseTheme('Light High Contrast', 'vscode-high-contrast-light');
+    await readout.locator('h1').scrollIntoViewIfNeeded();
     await shot('10-readout-high-contrast-light');
     await chooseTheme('Dark Modern', 'vscode-dark');
     await readout.locator('.caution').scrollIntoViewIfNeeded();

@@ -33,6 +33,6 @@ try {
   await browser.close();
   await workbench.stop();
 }
-if (!/ 0 failed$/.test(summary ?? '')) console.log(`the workbench's log:\n${noise.slice(-40).join('\n')}`);
+if (!/ 0 failed$/.test(summary ?? '')) console.log(`the workbench's log:\n${noise.slice(-15).join('\n')}`);
 // A crashed extension host ends like a happy one: without the suite's closing line nothing is known to have passed.
 console.log(summary ?? 'the extension host ended before the suite did');

@@ -18,7 +18,9 @@ function run(part) {
       process.stdout.write(chunk);
     });
     child.once('exit', () => {
-      const closing = /^(\d+) passed, (\d+) failed$/.exec(output.trimEnd().split('\n').at(-1) ?? '');
+      const closing = /^([1-9]\d*|0(?= passed, [1-9])) passed, (\d+) failed$/.exec(
+        output.trimEnd().split('\n').at(-1) ?? '',
+      );
       if (closing === null) console.log(`${part} ended without its closing line`);
       done(closing === null ? { passed: 0, failed: 1 } : { passed: Number(closing[1]), failed: Number(closing[2]) });
     });

@@ -10,7 +10,10 @@ const uri = 'file:///bench/transmitter.gainmodule.yaml';
 const lines = design.split('\n');
 
 /** The place of a piece of text in the design. */
-function placeOf(text: string): { start: { line: number; character: number }; end: { line: number; character: number } } {
+function placeOf(text: string): {
+  start: { line: number; character: number };
+  end: { line: number; character: number };
+} {
   const line = lines.findIndex((content) => content.includes(text));
   const character = lines[line]?.indexOf(text) ?? -1;
   return { start: { line, character }, end: { line, character: character + text.length } };
@@ -29,7 +32,8 @@ async function hoverAt(text: string): Promise<string> {
   const position = placeOf(text).start;
   const hover = await server.connection.sendRequest(HoverRequest.type, { textDocument: { uri }, position });
   const contents: unknown = hover?.contents;
-  const isMarkup = (value: unknown): value is MarkupContent => typeof value === 'object' && value !== null && 'kind' in value;
+  const isMarkup = (value: unknown): value is MarkupContent =>
+    typeof value === 'object' && value !== null && 'kind' in value;
   if (!isMarkup(contents)) throw new Error(`no Markdown at ${text}`);
   return contents.value;
 }
