@@ -8,7 +8,7 @@ const LARGEST_PART = 0.02;
 export const longPulse: Check = {
   code: 'long-pulse',
   title: 'Pump and decay matter during the pulse',
-  run({ outcome: { figures }, module: { medium } }) {
+  run({ outcome: { figures }, module: { medium, qSwitch } }) {
     const { width_fwhm_s = 0, build_up_time_s = 0 } = figures.pulse ?? {};
     const part = (width_fwhm_s + build_up_time_s) / medium.upperLevelLifetime;
     if (part <= LARGEST_PART) return [];
@@ -16,7 +16,7 @@ export const longPulse: Check = {
       {
         severity: 'information',
         message: `Build-up and pulse take ${formatPercent(part, 2)} of the upper level's lifetime. The model leaves out pumping and decay in that time: expect errors of that order.`,
-        path: 'q_switch.repetition_rate',
+        path: qSwitch.openingTime > build_up_time_s / 2 ? 'q_switch.opening_time' : 'q_switch.repetition_rate',
       },
     ];
   },
