@@ -99,7 +99,7 @@ const cases = {
     await reading('Pulse energy')
       .filter({ hasText: /13\.\d mJ/ })
       .waitFor();
-    await readout.locator('.caution', { hasText: 'Predictions, not measurements.' }).waitFor();
+    await readout.locator('.caution', { hasText: 'predictions, not measurements' }).waitFor();
     const drawn = await readout.locator('canvas').evaluate((canvas) => {
       const { data } = canvas.getContext('2d').getImageData(0, 0, canvas.width, canvas.height);
       return data.some((value) => value > 0);

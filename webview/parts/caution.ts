@@ -1,8 +1,8 @@
 import { element } from '../dom.ts';
 
-/** Stands at the foot of every readout, whatever else is shown. */
+/** Stands at the foot of every readout, whatever else is shown; a test holds it to the command's own words. */
 export const caution =
-  'Predictions, not measurements. Beams of this class can blind and burn. Local codes, the laser safety officer and licensed practice decide.';
+  'These figures are predictions, not measurements, and no interlock. Beams of this class blind and burn, also by reflection. Local codes, the laser safety officer and licensed practice decide.';
 
 export function cautionFoot(): HTMLElement {
   return element(
