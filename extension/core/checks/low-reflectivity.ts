@@ -1,7 +1,7 @@
 import { formatPercent } from '../quantity/format.ts';
 import type { Check } from './check.ts';
 
-/** Below this the uniform-loss convention drifts from reality. Source: `physics.md`; Degnan 1989 assumes small loss per pass. */
+/** Common practice, no source: below this the uniform-loss convention (Degnan, IEEE J. Quantum Electron. 25, 214 (1989)) drifts from reality. */
 const LOWEST_REFLECTIVITY = 0.3;
 
 /** A coupler so open that gain and field vary along the resonator. */

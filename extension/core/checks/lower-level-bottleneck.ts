@@ -2,7 +2,7 @@ import { findLine, findMedium } from '../physics/materials.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import type { Check } from './check.ts';
 
-/** Ratio of lower-level lifetime to photon lifetime from which energy changes by about 1 %. Source: `published-methods.md`, section 6 (0.1 gives 0.6 %). */
+/** Ratio of lower-level lifetime to photon lifetime from which energy falls by about 1 % (at 0.1 by 0.6 %, own two-manifold integration). Source: Degnan, Coyle & Kay, IEEE J. Quantum Electron. 34, 887 (1998). */
 const MATTERS_FROM = 0.15;
 
 /** The table knows a lower-level lifetime that is not short against the photon lifetime, and the file leaves it out. */
