@@ -1,3 +1,4 @@
+import { requirementName } from '../report/requirement-text.ts';
 import type { Check } from './check.ts';
 
 /** A requirement on a figure that this design has no prediction of. */
@@ -11,7 +12,7 @@ export const requirementNotJudged: Check = {
         : [
             {
               severity: 'warning' as const,
-              message: `Not judged: there is no prediction of the ${name.replaceAll('_', ' ').replace('hold off', 'hold-off').replace('build up', 'build-up')} here. ${REASON[name] ?? 'This release does not model it: verify it by measurement.'}`,
+              message: `Not judged: there is no prediction of the ${requirementName(name)} here. ${REASON[name] ?? 'This release does not model it: verify it by measurement.'}`,
               path: `requirements.${name}`,
             },
           ],

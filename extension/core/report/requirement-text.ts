@@ -13,6 +13,11 @@ const DIMENSION_OF: Readonly<Record<string, DimensionName>> = {
   divergence: 'angle',
 };
 
+/** A requirement's name as it is spoken of: `hold-off margin`. */
+export function requirementName(name: string): string {
+  return name.replaceAll('_', ' ').replace('hold off', 'hold-off').replace('build up', 'build-up');
+}
+
 /** A value of a requirement (SI) in engineering units. */
 export function formatRequirement(name: string, value: number): string {
   return formatQuantity(value, DIMENSION_OF[name] ?? 'ratio');

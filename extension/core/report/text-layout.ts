@@ -37,11 +37,11 @@ export function table(heading: readonly string[], rows: readonly (readonly strin
   return [(heading[0] ?? '').padEnd(first + INDENT) + rest(heading), ...body];
 }
 
-/** A text broken at spaces into lines of at most 80, later ones indented. */
+/** A text broken at spaces, or within a word that is longer than a line, into lines of at most 80, later ones indented. */
 export function wrapped(text: string, indent: number): string[] {
   const lines: string[] = [];
   let line = '';
-  for (const word of text.trimEnd().split(/(?<=\S) +/)) {
+  for (const word of words(text, WIDTH - indent)) {
     if (line && line.length + 1 + word.length > WIDTH) {
       lines.push(line);
       line = ' '.repeat(indent) + word;
@@ -50,6 +50,13 @@ export function wrapped(text: string, indent: number): string[] {
   return line ? [...lines, line] : lines;
 }
 
+/** Words with the blanks before the first; one longer than `most` falls into pieces. */
+function words(text: string, most: number): string[] {
+  const pieces = new RegExp(`.{1,${most}}`, 'gsu');
+  const whole = text.trimEnd().split(/(?<=\S) +/);
+  return whole.flatMap((word) => (word.length > most ? (word.match(pieces) ?? []) : [word]));
+}
+
 function clip(text: string, width: number): string {
-  return text.length <= width ? text : `${text.slice(0, Math.max(0, width - 1))}…`;
+  return text.length <= width ? text : `${text.slice(0, Math.max(0, width - 1)).replace(/[\ud800-\udbff]$/, '')}…`;
 }

@@ -4,7 +4,7 @@ import type { Prediction } from '../physics/prediction.ts';
 import { formatPercent, formatQuantity } from '../quantity/format.ts';
 import { CAUTION } from './caution.ts';
 import { createPositions } from './position.ts';
-import { formatLimits, formatRequirement } from './requirement-text.ts';
+import { formatLimits, formatRequirement, requirementName } from './requirement-text.ts';
 import { oneLine, row, table, wrapped } from './text-layout.ts';
 
 /** `giantpulse predict` for people: 80 columns, engineering units, the verdicts last where the eye ends. */
@@ -77,7 +77,7 @@ function surfaceTable(surfaces: Prediction['surfaces']): string[] {
 function requirementTable(requirements: Prediction['requirements']): string[] {
   if (requirements.length === 0) return [];
   const rows = requirements.map(({ name, met, predicted, minimum, maximum }) => [
-    name.replaceAll('_', ' '),
+    requirementName(name),
     predicted === undefined ? 'not predicted' : formatRequirement(name, predicted),
     formatLimits(name, minimum, maximum),
     met === undefined ? '' : met ? 'met' : 'MISSED',
@@ -88,7 +88,10 @@ function requirementTable(requirements: Prediction['requirements']): string[] {
 function filledIn(origins: ReadonlyMap<string, Origin>): string[] {
   if (origins.size === 0) return [];
   const rows = [...origins].map(([path, { kind, note, figure }]) =>
-    wrapped(`  ${path}: ${kind === 'default' ? note : `${figure?.text ?? ''}, ${note}; ${figure?.source ?? ''}`}`, 4),
+    wrapped(
+      `  ${path}: ${kind === 'default' ? note : `${figure?.text ?? ''}, ${note}; ${figure?.source ?? ''}${figure?.fromMemory ? ' (from memory)' : ''}`}`,
+      4,
+    ),
   );
   return ['Not in the file, filled in', ...rows.flat()];
 }
