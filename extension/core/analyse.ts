@@ -25,7 +25,7 @@ export function analyse(text: string): Analysis {
   const resolved = resolveDesign(design);
   const problems = [...design.problems, ...resolved.problems];
   const { module, origins } = resolved;
-  if (!module) return { design, resolved, problems };
+  if (!module) return { design, resolved, problems: inOrder(problems) };
   const outcome = predict(module, wantedFigures(design));
   if (!outcome) {
     const path = 'q_switch.kind';

@@ -1,6 +1,6 @@
 import type { RequirementFigures, SurfaceFigures } from '../core/physics/prediction.ts';
 import type { Problem } from '../core/report/problem.ts';
-import { formatLimits, formatRequirement } from '../core/report/requirement-text.ts';
+import { formatLimits, formatRequirement, requirementName } from '../core/report/requirement-text.ts';
 import type { RequirementRow, SurfaceRow, Verdict } from '../protocol/readout.ts';
 import { show } from './show.ts';
 
@@ -32,7 +32,7 @@ function verdictOf(path: string, problems: readonly Problem[]): Verdict {
 }
 
 export function requirementRow({ name, met, predicted, minimum, maximum }: RequirementFigures): RequirementRow {
-  const words = name.replaceAll('_', ' ');
+  const words = requirementName(name);
   return {
     name: words.charAt(0).toUpperCase() + words.slice(1),
     required: formatLimits(name, minimum, maximum),

@@ -30,6 +30,19 @@ describe('margin of a surface', () => {
     expect(messageOf(text, 'fluence-near-threshold')).toContain(`Margin ${margin.toPrecision(3)}, wanted 2:`);
   });
 
+  test('the pulse after a pause, by its own energy', () => {
+    const text = designOf('fluence-after-pause');
+    const { pulse_after_pause_energy_J: energy = Number.NaN } = predictionOf(text).train;
+    const fluence = (2 * energy) / (Math.PI * 0.045 ** 2) / (1 - 0.8);
+    expect(messageOf(text, 'fluence-after-pause')).toContain(`peak fluence ${fluence.toPrecision(3)} J/cm2 against`);
+    expect(
+      findingsOf(designOf('fluence-after-pause', ['safety_factor: 3', 'safety_factor: 1']), 'fluence-after-pause'),
+    ).toEqual([]);
+    const settledToo = designOf('fluence-after-pause', ['safety_factor: 3', 'safety_factor: 20']);
+    expect(findingsOf(settledToo, 'fluence-after-pause')).toEqual([]);
+    expect(findingsOf(settledToo, 'fluence-near-threshold')).toHaveLength(1);
+  });
+
   test('a margin just short of 1 is an error that does not read 1.00', () => {
     const { margin = 0 } = predictionOf(designOf('fluence-near-threshold')).surfaces[0] ?? {};
     const at = (wanted: number) =>

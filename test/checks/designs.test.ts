@@ -29,6 +29,7 @@ const SEVERITIES: Readonly<Record<string, string>> = {
   'requirement-not-judged': 'warning',
   'fluence-over-threshold': 'error',
   'fluence-near-threshold': 'warning',
+  'fluence-after-pause': 'warning',
   'impossible-timing': 'error',
   'opens-before-pump-end': 'warning',
   'train-unsettled': 'warning',

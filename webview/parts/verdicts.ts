@@ -5,7 +5,12 @@ const absent = '—';
 const marks: Readonly<Record<Verdict, string>> = { good: '✓', look: '!', bad: '✗', unknown: '?' };
 
 type Words = Readonly<Record<Verdict, string>>;
-const surfaceWords: Words = { good: 'holds', look: 'below wanted margin', bad: 'over threshold', unknown: 'not judged' };
+const surfaceWords: Words = {
+  good: 'holds',
+  look: 'below wanted margin',
+  bad: 'over threshold',
+  unknown: 'not judged',
+};
 const requirementWords: Words = { good: 'met', look: 'near', bad: 'missed', unknown: 'not predicted' };
 
 /** A mark and a word: the colour only repeats what they say. */

@@ -6,7 +6,7 @@ export const fluenceNearThreshold: Check = {
   code: 'fluence-near-threshold',
   title: 'A surface keeps less than the wanted safety factor',
   run: (context) =>
-    fluenceFinding(context, ({ margin, marginText, against, surface }) =>
+    fluenceFinding(context, context.outcome.train.settled, ({ margin, marginText, against, surface }) =>
       margin >= 1 && margin < surface.safetyFactor
         ? {
             severity: 'warning',

@@ -6,7 +6,7 @@ export const fluenceOverThreshold: Check = {
   code: 'fluence-over-threshold',
   title: 'A surface is past its damage threshold',
   run: (context) =>
-    fluenceFinding(context, ({ margin, marginText, against }) =>
+    fluenceFinding(context, context.outcome.train.settled, ({ margin, marginText, against }) =>
       margin < 1
         ? {
             severity: 'error',

@@ -1,3 +1,4 @@
+import { surfaceFigures } from '../physics/damage.ts';
 import type { Surface } from '../physics/gain-module.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import type { CheckContext, Finding } from './check.ts';
@@ -10,18 +11,26 @@ interface Judged {
   readonly against: string;
 }
 
+/** A pulse that surfaces are judged by: J, and full width at half maximum in s. */
+interface JudgedPulse {
+  readonly energy: number;
+  readonly width: number;
+}
+
 /** Runs a verdict over every surface that has a margin; findings fall on the surface's beam radius. */
 export function fluenceFinding(
-  { module, outcome }: CheckContext,
+  { module }: CheckContext,
+  pulse: JudgedPulse | undefined,
   verdict: (judged: Judged) => Pick<Finding, 'severity' | 'message'> | undefined,
 ): Finding[] {
-  return module.surfaces.flatMap((surface, index) => {
-    const figures = outcome.figures.surfaces[index];
-    if (figures?.margin === undefined || figures.threshold_J_per_cm2 === undefined) return [];
+  if (!pulse) return [];
+  return module.surfaces.flatMap((surface) => {
+    const figures = surfaceFigures(module, surface, pulse.energy, pulse.width);
+    if (figures.margin === undefined || figures.threshold_J_per_cm2 === undefined) return [];
     const fluence = formatQuantity(figures.peak_fluence_J_per_cm2 * 1e4, 'fluence');
     const threshold = formatQuantity(figures.threshold_J_per_cm2 * 1e4, 'fluence');
     const hotSpot = surface.hotSpotFactor === 1 ? '' : ` times a hot-spot factor of ${surface.hotSpotFactor}`;
-    const width = formatQuantity(outcome.figures.pulse?.width_fwhm_s ?? Number.NaN, 'time');
+    const width = formatQuantity(pulse.width, 'time');
     const found = verdict({
       surface,
       margin: figures.margin,

@@ -1,27 +1,16 @@
 import { formatQuantity } from '../quantity/format.ts';
-import type { Check, Finding } from './check.ts';
+import type { Check, CheckContext, Finding } from './check.ts';
 
 /** The switch opens and no giant pulse follows. */
 export const noPulse: Check = {
   code: 'no-pulse',
   title: 'No pulse is emitted',
-  run: ({ design, outcome }) => (outcome.figures.pulse ? [] : [reason(outcome, design)]),
+  run: (context) => (context.outcome.figures.pulse ? [] : [reason(context)]),
 };
 
-function reason(
-  { cavity, figures }: Parameters<Check['run']>[0]['outcome'],
-  design: Parameters<Check['run']>[0]['design'],
-): Finding {
+function reason({ design, outcome: { cavity, figures } }: CheckContext): Finding {
   const { round_trip_gain_log: gain = 0, round_trip_loss_log: loss } = figures.state;
-  const { pump, qSwitch } = cavity.module;
-  if (!(pump.power > 0)) {
-    const path = design.values.pump?.diode ? 'pump.diode.current' : 'pump.power';
-    return {
-      severity: 'error',
-      message: 'No pulse: the pump gives no power, so nothing is stored.',
-      path,
-    };
-  }
+  const { qSwitch } = cavity.module;
   const ratio = (gain / loss).toPrecision(3);
   if (gain > loss) {
     const gate = formatQuantity(qSwitch.gate, 'time');

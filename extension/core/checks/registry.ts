@@ -1,6 +1,7 @@
 import { beamBeyondMedium } from './beam-beyond-medium.ts';
 import type { Check } from './check.ts';
 import { fewRoundTrips } from './few-round-trips.ts';
+import { fluenceAfterPause } from './fluence-after-pause.ts';
 import { fluenceNearThreshold } from './fluence-near-threshold.ts';
 import { fluenceOverThreshold } from './fluence-over-threshold.ts';
 import { holdOff } from './hold-off.ts';
@@ -29,6 +30,7 @@ export const CHECKS: readonly Check[] = [
   requirementNotJudged,
   fluenceOverThreshold,
   fluenceNearThreshold,
+  fluenceAfterPause,
   thresholdConditions,
   impossibleTiming,
   opensBeforePumpEnd,

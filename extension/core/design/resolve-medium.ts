@@ -30,7 +30,12 @@ export function resolveMedium(section: Section, origins: Origins, report: Report
   };
   const wavelength =
     section.wavelength?.value ??
-    (row && origins.fallback('gain_medium.wavelength', row.wavelength, `the strongest line of ${row.name}`));
+    (row &&
+      origins.fallback(
+        'gain_medium.wavelength',
+        row.wavelength,
+        `${formatWavelength(row.wavelength)}, the strongest line of ${row.name}`,
+      ));
   const emission = pick('emission_cross_section');
   const lifetime = pick('upper_level_lifetime');
   const index = pick('refractive_index');

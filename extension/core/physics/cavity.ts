@@ -2,7 +2,7 @@ import { photonEnergy, SPEED_OF_LIGHT } from './constants.ts';
 import type { GainModule } from './gain-module.ts';
 import { type Rings, ringsFor } from './rings.ts';
 
-/** The quantities that every model of one module shares. Conventions: `physics.md`. */
+/** The quantities that every model of one module shares. Conventions: `docs/model.md`. */
 export interface Cavity {
   readonly module: GainModule;
   readonly rings: Rings;

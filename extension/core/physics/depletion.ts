@@ -4,7 +4,7 @@ import { gaussLegendre } from '../numerics/gauss-legendre.ts';
  * The pulse as a function of depletion x, where dx = 2γσI dt/(hν) with I the one-way intensity on axis.
  * `gain[k]` is ring k's share of the round-trip log gain before the pulse, `intensity[k]` its ψ; then
  * G(x) = Σ gain·exp(−ψx), and the field in units of hν/(2γσ t_r) is F(x) = start + ∫₀ˣ G dx' − loss·x.
- * Sources: Degnan, IEEE J. Quantum Electron. 25, 214 (1989); Wagner & Lengyel, J. Appl. Phys. 34, 2040 (1963); `physics.md`.
+ * Sources: Degnan, IEEE J. Quantum Electron. 25, 214 (1989); Wagner & Lengyel, J. Appl. Phys. 34, 2040 (1963).
  */
 export interface Depletion {
   readonly gain: Float64Array;

@@ -18,7 +18,7 @@ export interface Outcome {
 
 /**
  * Predicts an actively switched module: the settled pulse, its train, the best coupling, surfaces and requirements.
- * Undefined for a passive or absent switch, which this release does not model. Conventions: `physics.md`.
+ * Undefined for a passive or absent switch, which this release does not model. Conventions: `docs/model.md`.
  */
 export function predict(module: GainModule, requirements: readonly Requirement[]): Outcome | undefined {
   if (module.qSwitch.kind === 'saturable_absorber' || module.qSwitch.kind === 'none') return undefined;

@@ -25,7 +25,7 @@ const PUMP_DEPTH = 36;
 const SMALLEST_INTENSITY = 1e-15;
 
 /**
- * Rings for a mode and a pump that both extend over the whole plane (`physics.md`, "Inversion").
+ * Rings for a mode and a pump that both extend over the whole plane (`docs/model.md`, "Inversion").
  * A flat mode depletes evenly, so one ring with the mean inversion is exact. A Gaussian mode is cut in ψ,
  * where dA = −A dψ/ψ, at Gauss–Legendre nodes of a stretched coordinate; `reabsorbing` adds the unpumped part of the mode.
  * Radii in m, above 0.

@@ -12,7 +12,7 @@ export function photonsBehindSwitch(cavity: Cavity, gain: number): number {
 /**
  * Photons from which the field grows as if without a source once the switch is open: those there, and
  * G/(G − δ) for the spontaneous emission to come. From dφ/dt = [(G − δ)φ + G]/t_r with G still constant.
- * Source: `physics.md`, "Start"; Siegman, Lasers (1986), ch. 26.
+ * Source: Siegman, Lasers (1986), ch. 26.
  */
 export function effectiveStart(cavity: Cavity, gain: number, photons: number): number {
   return photons + gain / (gain - cavity.loss);

@@ -1,5 +1,6 @@
 import type { Analysis } from '../analyse.ts';
 import type { Origin } from '../design/origins.ts';
+import type { Surface } from '../physics/gain-module.ts';
 import type { Prediction } from '../physics/prediction.ts';
 import { formatPercent, formatQuantity } from '../quantity/format.ts';
 import { CAUTION } from './caution.ts';
@@ -58,20 +59,21 @@ function figureBlocks(prediction: Prediction, { outcome }: Analysis): string[][]
       ...row('pulse after a pause', train.pulse_after_pause_energy_J, 'energy', 'the store filled up'),
       ...row('optimum reflectivity', percent(coupling.optimum_reflectivity), energyThere(coupling.optimum_energy_J)),
     ],
-    surfaceTable(surfaces),
+    surfaceTable(surfaces, outcome?.cavity.module.surfaces ?? []),
     requirementTable(requirements),
   ];
 }
 
-function surfaceTable(surfaces: Prediction['surfaces']): string[] {
+function surfaceTable(surfaces: Prediction['surfaces'], wanted: readonly Surface[]): string[] {
   if (surfaces.length === 0) return [];
-  const rows = surfaces.map(({ name, peak_fluence_J_per_cm2, threshold_J_per_cm2, margin }) => [
+  const rows = surfaces.map(({ name, peak_fluence_J_per_cm2, threshold_J_per_cm2, margin }, index) => [
     oneLine(name),
     formatQuantity(peak_fluence_J_per_cm2 * 1e4, 'fluence'),
     threshold_J_per_cm2 === undefined ? 'not scaled' : formatQuantity(threshold_J_per_cm2 * 1e4, 'fluence'),
     margin === undefined ? '' : margin.toPrecision(3),
+    String(wanted[index]?.safetyFactor ?? ''),
   ]);
-  return table(['Surface', 'peak fluence', 'threshold', 'margin'], rows);
+  return table(['Surface', 'peak fluence', 'threshold', 'margin', 'wanted'], rows);
 }
 
 function requirementTable(requirements: Prediction['requirements']): string[] {
