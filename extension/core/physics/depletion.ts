@@ -37,6 +37,9 @@ const RULE = gaussLegendre(12);
 const NEWTON_LAST_STEP = 1e-8;
 const HALLEY_LAST_STEP = 1e-5;
 const MAXIMUM_ITERATIONS = 60;
+/** Coefficients of s, s², … in z where e^−z − 1 + z = s²/2, used up to the s where 1 + s²/2 is as good. */
+const SERIES = [1, 1 / 6, 1 / 36, 1 / 270, 1 / 4320, -1 / 17010, -139 / 5443200, -1 / 204120];
+const SERIES_REACH = 2.4;
 
 /** Σ gain: the round-trip log gain before the pulse. */
 export function smallSignalGain(gain: Float64Array): number {
@@ -59,21 +62,56 @@ export function depletionPulse(depletion: Depletion): DepletionPulse | undefined
   if (!(rise > 0)) return undefined;
   const peakAt = gainFallsTo(depletion, depletion.loss, course);
   const peak = course.field;
-  const bend = Math.sqrt(Math.max(0, peak / -course.slope));
-  const endsAt = fieldReaches(depletion, 0, 2 * peakAt, course);
-  if (!(peak > 2 * depletion.start) || !(endsAt > peakAt) || !Number.isFinite(endsAt)) return undefined;
-  const steepness = course.gain - depletion.loss;
+  const { slope } = course;
   const half = peak / 2;
-  const before = fieldReaches(depletion, half, Math.max((half - depletion.start) / rise, peakAt - bend), course);
-  const after = fieldReaches(depletion, half, Math.min(endsAt + half / steepness, peakAt + bend), course);
-  return { peakAt, endsAt, peak, width: timeBetween(depletion, before, after, endsAt, course) };
+  let endsAt = fieldReaches(depletion, 0, peakAt + fallsBy(depletion, peak, slope, 1), course);
+  // Rings that reabsorb may make the pulse end much sooner than guessed, but never before this.
+  if (!(endsAt > peakAt)) endsAt = fieldReaches(depletion, 0, 2 * peakAt, course);
+  if (!(peak > 2 * depletion.start) || !(endsAt > peakAt) || !Number.isFinite(endsAt)) return undefined;
+  // The tangents at both ends enclose the field, which is concave.
+  const earliest = (half - depletion.start) / rise;
+  const latest = endsAt + half / (course.gain - depletion.loss);
+  const early = Math.max(earliest, peakAt + fallsBy(depletion, half, slope, -1));
+  const before = fieldReaches(depletion, half, early, course);
+  const late = Math.min(peakAt + fallsBy(depletion, half, slope, 1), latest);
+  const after = fieldReaches(depletion, half, late, course);
+  return { peakAt, endsAt, peak, width: timeBetween(depletion, before, after, endsAt) };
+}
+
+/**
+ * How far after (`side` 1) or before (−1) the peak the field has fallen by `drop`, were the gain one exponential that
+ * has the loss as its value and `slope` as its slope at the peak: so it is for one ring, and more rings put the place
+ * between the result and the peak before it, beyond it after it. −∞ where that says nothing.
+ * With z the distance in e-foldings, e^−z − 1 + z = s²/2. Source: z = s + s²/6 + s³/36 + …, the series of
+ * Marsaglia & Marsaglia, Am. Math. Monthly 97, 826 (1990), or nearly 1 + s²/2 where z is large.
+ */
+function fallsBy({ loss }: Depletion, drop: number, slope: number, side: 1 | -1): number {
+  const fold = -loss / slope;
+  const level = drop / (loss * fold);
+  const s = side * Math.sqrt(2 * level);
+  if (s < -SERIES_REACH) return Number.NEGATIVE_INFINITY;
+  if (s > SERIES_REACH) return fold * (1 + level);
+  let sum = 0;
+  for (let i = SERIES.length - 1; i >= 0; i--) sum = s * (SERIES[i]! + sum);
+  return fold * sum;
+}
+
+/** Where Newton's method on ln G steps to from x = 0. */
+function firstGuess({ gain, intensity }: Depletion, level: number): number {
+  let sum = 0;
+  let slope = 0;
+  for (let k = 0; k < gain.length; k++) {
+    sum += gain[k]!;
+    slope += gain[k]! * intensity[k]!;
+  }
+  return slope > 0 ? (Math.log(sum / level) * sum) / slope : 0;
 }
 
 /** Smallest x > 0 where the gain has fallen to `level` (0 < level < G(0)), by Newton's method on ln G; leaves `course` there. */
 export function gainFallsTo(depletion: Depletion, level: number, course: Course): number {
   let low = 0;
   let high = Number.POSITIVE_INFINITY;
-  let x = 0;
+  let x = firstGuess(depletion, level);
   for (let pass = 0; pass < MAXIMUM_ITERATIONS; pass++) {
     follow(depletion, x, course);
     if (course.gain > level) low = x;
@@ -106,7 +144,7 @@ function fieldReaches(depletion: Depletion, level: number, guess: number, course
 }
 
 /** ∫ dx/F between two depletions inside the pulse, in units of t_r; u = ln[x/(end − x)] takes both zeros of F to infinity. */
-function timeBetween(depletion: Depletion, from: number, to: number, end: number, course: Course): number {
+function timeBetween(depletion: Depletion, from: number, to: number, end: number): number {
   const low = Math.log(from / (end - from));
   const half = (Math.log(to / (end - to)) - low) / 2;
   let sum = 0;
@@ -114,15 +152,17 @@ function timeBetween(depletion: Depletion, from: number, to: number, end: number
   const last = RULE.nodes.length - 1;
   for (let i = 0; 2 * i < last; i++) {
     const spread = Math.exp(half * RULE.nodes[i]!);
-    let pair = 0;
-    for (let odds = middle * spread, side = 0; side < 2; odds = middle / spread, side++) {
-      const x = (end * odds) / (1 + odds);
-      follow(depletion, x, course);
-      pair += x / ((1 + odds) * course.field);
-    }
+    const pair = paceAt(depletion, end, middle * spread) + paceAt(depletion, end, middle / spread);
     sum += RULE.weights[i]! * pair;
   }
   return sum * half;
+}
+
+/** dx/(F du) at u = ln(odds). */
+function paceAt(depletion: Depletion, end: number, odds: number): number {
+  const share = 1 / (1 + odds);
+  const x = end * odds * share;
+  return (x * share) / fieldAt(depletion, x);
 }
 
 /**
@@ -147,7 +187,7 @@ export function timeTo(depletion: Depletion, x: number): number {
 export function timeFromPeak(depletion: Depletion, pulse: DepletionPulse, fraction: number): number {
   const course: Course = { gain: Number.NaN, field: Number.NaN, slope: Number.NaN };
   const to = fieldReaches(depletion, fraction * pulse.peak, pulse.endsAt, course);
-  return timeBetween(depletion, pulse.peakAt, to, pulse.endsAt, course);
+  return timeBetween(depletion, pulse.peakAt, to, pulse.endsAt);
 }
 
 /** Depletions and times (units of t_r, zero at the peak) at `points` places between two equal fractions of the peak. */
@@ -166,12 +206,19 @@ export function timesBetween(
   const low = Math.log(from / (endsAt - from));
   const step = (Math.log(to / (endsAt - to)) - low) / (points - 1);
   const places = Array.from({ length: points }, (_, i) => endsAt / (1 + Math.exp(-(low + i * step))));
-  const before = timeBetween(depletion, from, peakAt, endsAt, course);
+  const before = timeBetween(depletion, from, peakAt, endsAt);
   let time = -before;
   return places.map((x, i) => {
-    if (i > 0) time += timeBetween(depletion, places[i - 1]!, x, endsAt, course);
+    if (i > 0) time += timeBetween(depletion, places[i - 1]!, x, endsAt);
     return { x, time };
   });
+}
+
+/** F alone. */
+function fieldAt({ gain, intensity, start, loss }: Depletion, x: number): number {
+  let field = start - loss * x;
+  for (let k = 0; k < gain.length; k++) field -= (gain[k]! * Math.expm1(-intensity[k]! * x)) / intensity[k]!;
+  return field;
 }
 
 function follow(depletion: Depletion, x: number, course: Course): void {
