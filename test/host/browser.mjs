@@ -33,8 +33,17 @@ export function quickPick(page, label) {
 }
 
 export async function runCommand(page, title) {
-  await page.keyboard.press('F1');
-  await page.locator('.quick-input-widget input[type="text"]').fill(`>${title}`);
+  const input = page.locator('.quick-input-widget input[type="text"]');
+  // A key that comes while the focus moves between editor and readout is lost: press it until the palette is there.
+  for (let attempt = 0; attempt < 6; attempt++) {
+    await page.keyboard.press('F1');
+    const shown = await input.waitFor({ timeout: 3000 }).then(
+      () => true,
+      () => false,
+    );
+    if (shown) break;
+  }
+  await input.fill(`>${title}`);
   await quickPick(page, title).click();
 }
 

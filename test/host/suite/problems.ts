@@ -27,7 +27,7 @@ export const problems: readonly Case[] = [
       assert.match(code.target.path, /extension\/docs\/checks\.md$/);
       const text = new TextDecoder().decode(await workspace.fs.readFile(code.target.with({ fragment: '' })));
       const line = Number(/^L(\d+)$/.exec(code.target.fragment)?.[1]);
-      assert.match(text.split('\n')[line - 1] ?? '', /^#+ .*missing-unit/);
+      assert.match(text.split('\n')[line - 1] ?? '', /^<a id="missing-unit">/);
     },
   },
   {
