@@ -29,20 +29,21 @@ export interface LowerLevel {
   readonly lifetime: number;
 }
 
-/** Indices into the state: ln(1 + φ), x, then the upper levels of all rings, then the lower ones. */
+/** Indices into the state: ln(φ + seed), x, then the upper levels of all rings, then the lower ones. */
 const FIELD = 0;
 const DEPLETION = 1;
 const RINGS = 2;
-/** The pulse is over where the field has fallen to e^−23 (1e-10) of its peak. */
-const TAIL = 23;
-const HUNDREDTH = Math.log(100);
-/** A pulse takes some 60 steps; one that takes so many more is none. */
+/** The pulse is over where the field has fallen to this part of its peak, or nearly to what is emitted spontaneously. */
+const TAIL = 1e-10;
+/** About the part of the peak from which on the trace is kept: there the field has taken this part of the excess gain. */
+const SHOWN = 1e-4;
+/** A pulse takes some 50 steps; one that takes so many more is none. */
 const MOST_STEPS = 4000;
 
 /**
  * The rate equations with their spontaneous source, ring by ring:
- * dφ/dt = [(G − loss(t))φ + G]/t_r and dN/dt = −ψ n dx/dt with dx/dt = 2γσφ/(A t_r), solved for ln(1 + φ),
- * in which build-up is a straight line. Undefined where no pulse ends before `until` (s).
+ * dφ/dt = [(G − loss(t))φ + G]/t_r and dN/dt = −ψ n dx/dt with dx/dt = 2γσφ/(A t_r), solved for ln(φ + seed) with
+ * seed = G/(G − δ), in which build-up is a straight line. Undefined where no pulse ends before `until` (s).
  * Independent of the depletion form; both must agree where the switch opens at once.
  */
 export function integratePulse(
@@ -54,53 +55,63 @@ export function integratePulse(
   tolerance = 1e-10,
 ): IntegratedPulse | undefined {
   const count = gain.length;
+  const whole = smallSignalGain(gain);
+  const seed = whole > cavity.loss ? whole / (whole - cavity.loss) : 1;
+  const { openingTime } = cavity.module.qSwitch;
   const initial = new Float64Array(RINGS + (lower ? 2 : 1) * count);
-  const opening = openingStart(cavity, smallSignalGain(gain), photons);
-  initial[FIELD] = Math.log1p(opening.photons);
+  const opening = openingStart(cavity, whole, photons);
+  initial[FIELD] = Math.log(opening.photons + seed);
   initial.set(gain, RINGS);
-  const rhs = rateEquations(cavity, count, lower);
-  const trace = createTrace(count, lower?.weight ?? 0);
-  let peak = { time: Number.NaN, field: Number.NEGATIVE_INFINITY };
-  let halfTime = Number.NaN;
-  let endTime = Number.NaN;
-  let followed = false;
-  const slope = new Float64Array(initial.length);
+  const rhs = rateEquations(cavity, count, seed, lower);
+  const trace = createTrace(count, seed, lower?.weight ?? 0);
+  const takes = depletable(cavity, gain) / SHOWN;
+  const gainOf = (state: Float64Array) => gainIn(state, count, lower?.weight ?? 0);
+  const lossAt = (time: number) => cavity.loss + (time < openingTime ? openingLoss(cavity, time) : 0);
   const scratch = new Float64Array(initial.length);
   const growth = (step: AcceptedStep, time: number) => {
     step.interpolateAll(time, scratch);
-    rhs(time, scratch, slope);
-    return slope[FIELD]!;
+    const now = gainOf(scratch);
+    return (now - lossAt(time)) * (Math.exp(scratch[FIELD]!) - seed) + now;
   };
-  const crossing = (step: AcceptedStep, level: number) => {
-    const from = Math.max(step.start, peak.time);
+  let peakTime = Number.NaN;
+  let peakPhotons = Number.NaN;
+  let halfTime = Number.NaN;
+  let endTime = Number.NaN;
+  let followed = false;
+  /** When the field falls through a part of its peak, if it does so in this step. */
+  const falls = (step: AcceptedStep, part: number) => {
+    const level = Math.log(part * peakPhotons + seed);
+    if (!(step.after[FIELD]! < level)) return Number.NaN;
+    const from = Math.max(step.start, peakTime);
     return rootBetween((time) => step.interpolate(time, FIELD) - level, from, step.end) ?? Number.NaN;
   };
   const observe = (step: AcceptedStep): boolean => {
-    trace.add(step);
-    const field = step.after[FIELD]!;
-    if (Number.isNaN(peak.time)) {
-      rhs(step.end, step.after, slope);
-      if (slope[FIELD]! >= 0 || field < 1) return false;
-      const time = rootBetween((at) => growth(step, at), step.start, step.end);
-      if (time === undefined) return false;
-      peak = { time, field: step.interpolate(time, FIELD) };
-    }
-    if (Number.isNaN(halfTime) && field < peak.field - Math.LN2) halfTime = crossing(step, peak.field - Math.LN2);
-    if (Number.isNaN(endTime) && field < peak.field - HUNDREDTH) endTime = crossing(step, peak.field - HUNDREDTH);
-    rhs(step.end, step.after, slope);
-    if (slope[FIELD]! > 0 && !Number.isNaN(halfTime)) {
+    const now = gainOf(step.after);
+    const excess = now - lossAt(step.end);
+    const field = Math.exp(step.after[FIELD]!) - seed;
+    if (Number.isNaN(peakTime)) {
+      if (step.after[DEPLETION]! * takes > excess) trace.add(step);
+      if (excess * field + now >= 0 || field < 1) return false;
+      peakTime = rootBetween((time) => growth(step, time), step.start, step.end) ?? Number.NaN;
+      peakPhotons = Math.exp(step.interpolate(peakTime, FIELD)) - seed;
+    } else if (Math.exp(step.before[FIELD]!) > SHOWN * peakPhotons) trace.add(step);
+    if (Number.isNaN(halfTime)) halfTime = falls(step, 0.5);
+    if (Number.isNaN(endTime)) endTime = falls(step, 0.01);
+    if (excess > 0 && !Number.isNaN(halfTime)) {
       // The loss still falls, or the inversion refills: another pulse follows, and this one ends between them.
       followed = true;
       endTime = Number.isNaN(endTime) ? step.end : endTime;
     }
-    return followed || field < peak.field - TAIL;
+    const settled = -excess * field < 2 * now && step.end >= openingTime && !lower && !Number.isNaN(endTime);
+    return followed || settled || field < TAIL * peakPhotons;
   };
   const options = {
     relativeTolerance: tolerance,
-    absoluteTolerance: absoluteTolerances(initial, gain, tolerance),
+    absoluteTolerance: initial.map((_, i) =>
+      i < RINGS ? tolerance : tolerance * smallSignalGain(gain.map(Math.abs)) * 0.1,
+    ),
     maximumSteps: MOST_STEPS,
   };
-  const { openingTime } = cavity.module.qSwitch;
   let outcome: IntegrationOutcome | undefined;
   let evaluations = 0;
   let steps = 0;
@@ -114,11 +125,11 @@ export function integratePulse(
     steps += outcome.steps;
     if (outcome.status !== 'reached' && outcome.status !== 'stopped') return undefined;
   }
-  const rise = trace.rises(peak.field - Math.LN2);
+  const rise = trace.rises(peakPhotons / 2);
   if (outcome === undefined || !(endTime > halfTime) || rise === undefined) return undefined;
   return {
-    peakPhotons: Math.expm1(peak.field),
-    peakTime: peak.time,
+    peakPhotons,
+    peakTime,
     width: halfTime - rise,
     endTime,
     followed,
@@ -129,32 +140,49 @@ export function integratePulse(
   };
 }
 
-function rateEquations(cavity: Cavity, count: number, lower: LowerLevel | undefined): RightHandSide {
+function rateEquations(cavity: Cavity, count: number, seed: number, lower: LowerLevel | undefined): RightHandSide {
   const { roundTripTime, photonField, loss } = cavity;
   const { openingTime } = cavity.module.qSwitch;
   const psi = cavity.rings.intensity;
   const perTrip = 1 / roundTripTime;
+  const { weight, lifetime } = lower ?? { weight: 0, lifetime: Number.POSITIVE_INFINITY };
   return (time, state, derivative) => {
-    const photons = Math.expm1(state[FIELD]!);
-    const pace = photonField * photons * perTrip;
+    const grown = Math.exp(state[FIELD]!);
+    const pace = photonField * (grown - seed) * perTrip;
     let gain = 0;
-    for (let k = 0; k < count; k++) {
-      const upper = state[RINGS + k]!;
-      const below = lower ? state[RINGS + count + k]! : 0;
-      const inversion = lower ? upper - lower.weight * below : upper;
-      const rate = psi[k]! * inversion * pace;
-      gain += inversion;
-      derivative[RINGS + k] = -rate;
-      if (lower) derivative[RINGS + count + k] = rate - below / lower.lifetime;
+    if (lower === undefined) {
+      for (let i = RINGS; i < RINGS + count; i++) {
+        const inversion = state[i]!;
+        gain += inversion;
+        derivative[i] = -psi[i - RINGS]! * inversion * pace;
+      }
+    } else {
+      for (let i = RINGS; i < RINGS + count; i++) {
+        const below = state[i + count]!;
+        const inversion = state[i]! - weight * below;
+        const rate = psi[i - RINGS]! * inversion * pace;
+        gain += inversion;
+        derivative[i] = -rate;
+        derivative[i + count] = rate - below / lifetime;
+      }
     }
-    const closing = time < openingTime ? openingLoss(cavity, time) : 0;
-    derivative[FIELD] = (gain - ((loss + closing) * photons) / (1 + photons)) * perTrip;
+    const excess = gain - (time < openingTime ? loss + openingLoss(cavity, time) : loss);
+    derivative[FIELD] = (excess + (gain - excess * seed) / grown) * perTrip;
     derivative[DEPLETION] = pace;
   };
 }
 
-/** Rings count by their share in the gain, the field by its logarithm, depletion by its size. */
-function absoluteTolerances(initial: Float64Array, gain: Float64Array, tolerance: number): Float64Array {
-  const whole = smallSignalGain(gain.map(Math.abs));
-  return initial.map((_, i) => (i < RINGS ? tolerance : tolerance * whole * 0.1));
+/** Loss of gain per unit of depletion at the start. */
+function depletable(cavity: Cavity, gain: Float64Array): number {
+  let sum = 0;
+  for (let k = 0; k < gain.length; k++) sum += Math.abs(gain[k]!) * cavity.rings.intensity[k]!;
+  return sum;
+}
+
+/** G of a state. */
+function gainIn(state: Float64Array, count: number, lowerWeight: number): number {
+  let gain = 0;
+  for (let i = RINGS; i < RINGS + count; i++) gain += state[i]!;
+  if (lowerWeight > 0) for (let i = RINGS + count; i < state.length; i++) gain -= lowerWeight * state[i]!;
+  return gain;
 }

@@ -4,16 +4,16 @@ import { rootBetween } from '../numerics/root.ts';
 /** What is kept of an integration: the course of the field and the gain, step by step. */
 export interface Trace {
   add(step: AcceptedStep): void;
-  /** Last time (s) before the peak at which ln(1 + φ) rose through a level. */
-  rises(level: number): number | undefined;
-  /** Times in s, ln(1 + φ) and G at the ends of all steps and at points within them. */
+  /** First time (s) at which the photons in the mode rose through a number. */
+  rises(photons: number): number | undefined;
+  /** Times in s, ln(1 + φ) and G at the ends of all steps kept and at points within them. */
   samples(): { readonly time: number[]; readonly field: number[]; readonly gain: number[] };
 }
 
 interface Segment {
   readonly start: number;
   readonly end: number;
-  /** ln(1 + φ) at the Chebyshev nodes of the step: they carry the whole dense polynomial. */
+  /** ln(φ + seed) at the Chebyshev nodes of the step: they carry the whole dense polynomial. */
   readonly field: Float64Array;
   readonly gainBefore: number;
   readonly gainAfter: number;
@@ -21,8 +21,8 @@ interface Segment {
 
 const NODES = Float64Array.from({ length: 8 }, (_, i) => -Math.cos((Math.PI * i) / 7));
 
-/** A trace of a state laid out as ln(1 + φ), x, upper shares, lower shares weighted by `lowerWeight`. */
-export function createTrace(rings: number, lowerWeight: number): Trace {
+/** A trace of a state laid out as ln(φ + seed), x, upper shares, lower shares weighted by `lowerWeight`. */
+export function createTrace(rings: number, seed: number, lowerWeight: number): Trace {
   const segments: Segment[] = [];
   const gainOf = (state: Float64Array) => {
     let gain = 0;
@@ -32,22 +32,16 @@ export function createTrace(rings: number, lowerWeight: number): Trace {
   return {
     add(step) {
       const half = (step.end - step.start) / 2;
-      // Early build-up is no part of the pulse: less than a hundred photons, or the gain still whole.
-      const kept = step.after[0]! > 5;
-      const field = kept
-        ? NODES.map((node) => step.interpolate(step.start + half * (1 + node), 0))
-        : new Float64Array(0);
-      if (kept) {
-        segments.push({
-          start: step.start,
-          end: step.end,
-          field,
-          gainBefore: gainOf(step.before),
-          gainAfter: gainOf(step.after),
-        });
-      }
+      segments.push({
+        start: step.start,
+        end: step.end,
+        field: NODES.map((node) => step.interpolate(step.start + half * (1 + node), 0)),
+        gainBefore: gainOf(step.before),
+        gainAfter: gainOf(step.after),
+      });
     },
-    rises(level) {
+    rises(photons) {
+      const level = Math.log(photons + seed);
       const found = segments.find((s) => s.field[0]! <= level && s.field[7]! > level);
       return found && rootBetween((time) => fieldAt(found, time) - level, found.start, found.end);
     },
@@ -59,7 +53,7 @@ export function createTrace(rings: number, lowerWeight: number): Trace {
         for (let i = 0; i < 8; i++) {
           const share = (1 + NODES[i]!) / 2;
           time.push(s.start + share * (s.end - s.start));
-          field.push(s.field[i]!);
+          field.push(Math.log(Math.max(1, Math.exp(s.field[i]!) - seed + 1)));
           gain.push(s.gainBefore + share * (s.gainAfter - s.gainBefore));
         }
       }
