@@ -29,5 +29,7 @@ export class Solver {
   initialStepSize: number;
   maxStepSize: number;
   denseOutput: boolean;
+  /** Which components it covers; all if absent. */
+  denseComponents: number[];
   solve(f: Derivative, x: number, y0: number[], xEnd: number, output?: OutputFunction): Solution;
 }

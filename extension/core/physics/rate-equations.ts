@@ -36,7 +36,7 @@ const RINGS = 2;
 /** The pulse is over where the field has fallen to this part of its peak, or nearly to what is emitted spontaneously. */
 const TAIL = 1e-10;
 /** About the part of the peak from which on the trace is kept: there the field has taken this part of the excess gain. */
-const SHOWN = 1e-4;
+const SHOWN = 3e-4;
 /** A pulse takes some 50 steps; one that takes so many more is none. */
 const MOST_STEPS = 4000;
 
@@ -67,12 +67,6 @@ export function integratePulse(
   const takes = depletable(cavity, gain) / SHOWN;
   const gainOf = (state: Float64Array) => gainIn(state, count, lower?.weight ?? 0);
   const lossAt = (time: number) => cavity.loss + (time < openingTime ? openingLoss(cavity, time) : 0);
-  const scratch = new Float64Array(initial.length);
-  const growth = (step: AcceptedStep, time: number) => {
-    step.interpolateAll(time, scratch);
-    const now = gainOf(scratch);
-    return (now - lossAt(time)) * (Math.exp(scratch[FIELD]!) - seed) + now;
-  };
   let peakTime = Number.NaN;
   let peakPhotons = Number.NaN;
   let halfTime = Number.NaN;
@@ -92,7 +86,7 @@ export function integratePulse(
     if (Number.isNaN(peakTime)) {
       if (step.after[DEPLETION]! * takes > excess) trace.add(step);
       if (excess * field + now >= 0 || field < 1) return false;
-      peakTime = rootBetween((time) => growth(step, time), step.start, step.end) ?? Number.NaN;
+      peakTime = peakWithin(step);
       peakPhotons = Math.exp(step.interpolate(peakTime, FIELD)) - seed;
     } else if (Math.exp(step.before[FIELD]!) > SHOWN * peakPhotons) trace.add(step);
     if (Number.isNaN(halfTime)) halfTime = falls(step, 0.5);
@@ -138,6 +132,13 @@ export function integratePulse(
     trace,
     statistics: { steps, evaluations },
   };
+}
+
+/** Where the field, which grows at the start of the step and falls at its end, turns: its dense output's slope is zero. */
+function peakWithin(step: AcceptedStep): number {
+  const apart = 1e-4 * (step.end - step.start);
+  const slope = (time: number) => step.interpolate(time + apart, FIELD) - step.interpolate(time - apart, FIELD);
+  return rootBetween(slope, step.start, step.end) ?? (slope(step.end) > 0 ? step.end : step.start);
 }
 
 function rateEquations(cavity: Cavity, count: number, seed: number, lower: LowerLevel | undefined): RightHandSide {

@@ -32,10 +32,12 @@ export function createTrace(rings: number, seed: number, lowerWeight: number): T
   return {
     add(step) {
       const half = (step.end - step.start) / 2;
+      const field = new Float64Array(NODES.length);
+      for (let i = 0; i < field.length; i++) field[i] = step.interpolate(step.start + half * (1 + NODES[i]!), 0);
       segments.push({
         start: step.start,
         end: step.end,
-        field: NODES.map((node) => step.interpolate(step.start + half * (1 + node), 0)),
+        field,
         gainBefore: gainOf(step.before),
         gainAfter: gainOf(step.after),
       });
