@@ -72,6 +72,7 @@ export function integratePulse(
   let halfTime = Number.NaN;
   let endTime = Number.NaN;
   let followed = false;
+  const final = new Float64Array(initial.length);
   /** When the field falls through a part of its peak, if it does so in this step. */
   const falls = (step: AcceptedStep, part: number) => {
     const level = Math.log(part * peakPhotons + seed);
@@ -86,24 +87,26 @@ export function integratePulse(
     if (Number.isNaN(peakTime)) {
       if (step.after[DEPLETION]! * takes > excess) trace.add(step);
       if (excess * field + now >= 0 || field < 1) return false;
-      peakTime = peakWithin(step);
+      peakTime = turningPoint(step);
       peakPhotons = Math.exp(step.interpolate(peakTime, FIELD)) - seed;
     } else if (Math.exp(step.before[FIELD]!) > SHOWN * peakPhotons) trace.add(step);
     if (Number.isNaN(halfTime)) halfTime = falls(step, 0.5);
     if (Number.isNaN(endTime)) endTime = falls(step, 0.01);
     if (excess > 0 && !Number.isNaN(halfTime)) {
-      // The loss still falls, or the inversion refills: another pulse follows, and this one ends between them.
+      // The loss still falls, or the inversion refills: another pulse follows, and this one ends where the field is least.
+      const least = turningPoint(step);
       followed = true;
-      endTime = Number.isNaN(endTime) ? step.end : endTime;
+      endTime = Number.isNaN(endTime) ? least : endTime;
+      step.interpolateAll(least, final);
     }
     const settled = -excess * field < 2 * now && step.end >= openingTime && !lower && !Number.isNaN(endTime);
     return followed || settled || field < TAIL * peakPhotons;
   };
+  // Rings count by their share in the gain.
+  const share = tolerance * smallSignalGain(gain.map(Math.abs)) * 0.1;
   const options = {
     relativeTolerance: tolerance,
-    absoluteTolerance: initial.map((_, i) =>
-      i < RINGS ? tolerance : tolerance * smallSignalGain(gain.map(Math.abs)) * 0.1,
-    ),
+    absoluteTolerance: initial.map((_, i) => (i < RINGS ? tolerance : share)),
     maximumSteps: MOST_STEPS,
   };
   let outcome: IntegrationOutcome | undefined;
@@ -119,6 +122,7 @@ export function integratePulse(
     steps += outcome.steps;
     if (outcome.status !== 'reached' && outcome.status !== 'stopped') return undefined;
   }
+  if (outcome && !followed) final.set(outcome.state);
   const rise = trace.rises(peakPhotons / 2);
   if (outcome === undefined || !(endTime > halfTime) || rise === undefined) return undefined;
   return {
@@ -127,18 +131,21 @@ export function integratePulse(
     width: halfTime - rise,
     endTime,
     followed,
-    depletion: outcome.state[DEPLETION]!,
-    left: outcome.state.slice(RINGS, RINGS + count),
+    depletion: final[DEPLETION]!,
+    left: final.slice(RINGS, RINGS + count),
     trace,
     statistics: { steps, evaluations },
   };
 }
 
-/** Where the field, which grows at the start of the step and falls at its end, turns: its dense output's slope is zero. */
-function peakWithin(step: AcceptedStep): number {
+/** Where the field turns within a step that it enters growing and leaves falling, or the other way round. */
+function turningPoint(step: AcceptedStep): number {
   const apart = 1e-4 * (step.end - step.start);
   const slope = (time: number) => step.interpolate(time + apart, FIELD) - step.interpolate(time - apart, FIELD);
-  return rootBetween(slope, step.start, step.end) ?? (slope(step.end) > 0 ? step.end : step.start);
+  return (
+    rootBetween(slope, step.start, step.end) ??
+    (Math.abs(slope(step.end)) < Math.abs(slope(step.start)) ? step.end : step.start)
+  );
 }
 
 function rateEquations(cavity: Cavity, count: number, seed: number, lower: LowerLevel | undefined): RightHandSide {
