@@ -17,6 +17,7 @@ await build({
   format: 'cjs',
   target: 'node20',
   mainFields: ['module', 'main'],
+  alias: { yaml: './node_modules/yaml/browser/index.js' },
   logLevel: 'warning',
 });
 const { bench } = createRequire(import.meta.url)(outfile);
