@@ -24,7 +24,7 @@ function compare(each: Case, error: number): Row[] {
   );
   const [t = Number.NaN, log = Number.NaN, raw = Number.NaN] = times;
   const target = { least: 2 };
-  const title = `${name}, ${error.toExponential(0)}: odex on`;
+  const title = `${name}, ${error.toExponential(0)}; odex:`;
   return [
     { what: `${title} ln(φ+seed)`, ours: time(t), other: time(log), ratio: log / t, target },
     { what: `${' '.repeat(title.length)} φ itself`, ours: time(t), other: time(raw), ratio: raw / t, target },

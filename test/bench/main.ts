@@ -10,7 +10,7 @@ export function bench(root: string): void {
   const sections: readonly (readonly [title: string, note: string, rows: (root: string) => Row[]])[] = [
     [
       'One prediction of energy, peak and width against the raw rate equations',
-      'which odex solves with errors up to 1e-8',
+      'which odex 2.0.4 solves with errors up to 1e-8',
       predictions,
     ],
     [

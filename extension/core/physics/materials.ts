@@ -163,6 +163,7 @@ function nearest(medium: Medium, wavelength: number): LineText | undefined {
 
 function readLine(medium: Medium, line: LineText): MediumRow {
   const [from, to] = (line.pump_band ?? []).map(metres);
+  let figures: Figures | undefined;
   return {
     name: medium.name,
     kind: MEDIUM_KINDS.find((kind) => kind === (line.kind ?? medium.kind)) ?? 'four_level',
@@ -170,8 +171,12 @@ function readLine(medium: Medium, line: LineText): MediumRow {
     strongest: line.strongest,
     pumpWavelengths: line.pump_wavelengths.map(metres),
     ...(from === undefined || to === undefined ? {} : { pumpBand: [from, to] as const }),
-    // A line's own figure wins over the host's.
-    figures: readFigures({ ...medium.figures, ...line.figures }),
+    /** Read when first asked for: mostly the question is only whether there is such a line. */
+    get figures() {
+      // A line's own figure wins over the host's.
+      figures ??= readFigures({ ...medium.figures, ...line.figures });
+      return figures;
+    },
   };
 }
 
