@@ -27,6 +27,8 @@ export function fluenceFinding(
   return module.surfaces.flatMap((surface) => {
     const figures = surfaceFigures(module, surface, pulse.energy, pulse.width);
     if (figures.margin === undefined || figures.threshold_J_per_cm2 === undefined) return [];
+    // Nothing to say of most surfaces: their texts would cost more than all the rest.
+    if (figures.margin >= Math.max(1, surface.safetyFactor)) return [];
     const fluence = formatQuantity(figures.peak_fluence_J_per_cm2 * 1e4, 'fluence');
     const threshold = formatQuantity(figures.threshold_J_per_cm2 * 1e4, 'fluence');
     const hotSpot = surface.hotSpotFactor === 1 ? '' : ` times a hot-spot factor of ${surface.hotSpotFactor}`;

@@ -24,7 +24,7 @@ export function rootBetween(f: (x: number) => number, from: number, to: number):
     const middle = (c - b) / 2;
     if (Math.abs(middle) <= tolerance) break;
     const trial = interpolate(a, b, c, fa, fb, fc);
-    const limit = Math.min(Math.abs(previous) / 2, 0.75 * Math.abs(middle));
+    const limit = Math.min(Math.abs(previous) / 2, 1.5 * Math.abs(middle));
     const taken = Math.abs(trial) < limit && trial * middle > 0 ? trial : middle;
     previous = taken === middle ? middle : step;
     step = taken;

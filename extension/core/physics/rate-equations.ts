@@ -37,6 +37,11 @@ const RINGS = 2;
 const TAIL = 1e-10;
 /** About the part of the peak from which on the trace is kept: there the field has taken this part of the excess gain. */
 const SHOWN = 3e-4;
+/**
+ * A lower level that lives for less than this part of the time in which the field grows e-fold holds just what it is
+ * fed, N_l = lifetime · stimulated rate: following it would cost steps and change the pulse by less than 1e-5.
+ */
+const PROMPT = 4e-3;
 /** A pulse takes some 50 steps; one that takes so many more is none. */
 const MOST_STEPS = 4000;
 
@@ -58,14 +63,24 @@ export function integratePulse(
   const whole = smallSignalGain(gain);
   const seed = whole > cavity.loss ? whole / (whole - cavity.loss) : 1;
   const { openingTime } = cavity.module.qSwitch;
-  const initial = new Float64Array(RINGS + (lower ? 2 : 1) * count);
+  const prompt = lower !== undefined && lower.lifetime * (whole - cavity.loss) < PROMPT * cavity.roundTripTime;
+  const followedLower = prompt ? undefined : lower;
+  const lag = prompt ? lower.weight * lower.lifetime : 0;
+  const initial = new Float64Array(RINGS + (followedLower ? 2 : 1) * count);
   const opening = openingStart(cavity, whole, photons);
   initial[FIELD] = Math.log(opening.photons + seed);
   initial.set(gain, RINGS);
-  const rhs = rateEquations(cavity, count, seed, lower);
-  const trace = createTrace(count, seed, lower?.weight ?? 0);
+  const rhs = rateEquations(cavity, count, seed, lag, followedLower);
+  const trace = createTrace(count, seed, followedLower?.weight ?? 0);
   const takes = depletable(cavity, gain) / SHOWN;
-  const gainOf = (state: Float64Array) => gainIn(state, count, lower?.weight ?? 0);
+  const slope = new Float64Array(initial.length);
+  const gainOf = (time: number, state: Float64Array) => {
+    if (lag === 0) return gainIn(state, count, followedLower?.weight ?? 0);
+    rhs(time, state, slope);
+    let taken = 0;
+    for (let i = RINGS; i < state.length; i++) taken -= slope[i]! / cavity.rings.intensity[i - RINGS]!;
+    return slope[DEPLETION]! > 0 ? taken / slope[DEPLETION]! : whole;
+  };
   const lossAt = (time: number) => cavity.loss + (time < openingTime ? openingLoss(cavity, time) : 0);
   let peakTime = Number.NaN;
   let peakPhotons = Number.NaN;
@@ -81,7 +96,7 @@ export function integratePulse(
     return rootBetween((time) => step.interpolate(time, FIELD) - level, from, step.end) ?? Number.NaN;
   };
   const observe = (step: AcceptedStep): boolean => {
-    const now = gainOf(step.after);
+    const now = gainOf(step.end, step.after);
     const excess = now - lossAt(step.end);
     const field = Math.exp(step.after[FIELD]!) - seed;
     if (Number.isNaN(peakTime)) {
@@ -148,7 +163,14 @@ function turningPoint(step: AcceptedStep): number {
   );
 }
 
-function rateEquations(cavity: Cavity, count: number, seed: number, lower: LowerLevel | undefined): RightHandSide {
+/** `lag`: κ times the lifetime of a lower level that holds just what it is fed, s; `lower`: one that is followed. */
+function rateEquations(
+  cavity: Cavity,
+  count: number,
+  seed: number,
+  lag: number,
+  lower: LowerLevel | undefined,
+): RightHandSide {
   const { roundTripTime, photonField, loss } = cavity;
   const { openingTime } = cavity.module.qSwitch;
   const psi = cavity.rings.intensity;
@@ -160,9 +182,10 @@ function rateEquations(cavity: Cavity, count: number, seed: number, lower: Lower
     let gain = 0;
     if (lower === undefined) {
       for (let i = RINGS; i < RINGS + count; i++) {
-        const inversion = state[i]!;
+        const rate = psi[i - RINGS]! * pace;
+        const inversion = state[i]! / (1 + lag * rate);
         gain += inversion;
-        derivative[i] = -psi[i - RINGS]! * inversion * pace;
+        derivative[i] = -rate * inversion;
       }
     } else {
       for (let i = RINGS; i < RINGS + count; i++) {
