@@ -64,3 +64,8 @@ function pumpedToRatio(ratio: number, module: GainModule): GainModule {
   const dark = gainAt(0);
   return moduleWith({ pump: { power: (ratio * lossOf(module) - dark) / (gainAt(1) - dark) } }, module);
 }
+
+/** The same design with a switch that holds whatever the pump brings. */
+export function withoutHoldOff(module: GainModule): GainModule {
+  return { ...module, qSwitch: moduleWith({ qSwitch: { gate: 25e-3 } }).qSwitch };
+}

@@ -25,7 +25,7 @@ export function rootBetween(f: (x: number) => number, from: number, to: number):
     if (Math.abs(middle) <= tolerance) break;
     const trial = interpolate(a, b, c, fa, fb, fc);
     const limit = Math.min(Math.abs(previous) / 2, 1.5 * Math.abs(middle));
-    const taken = Math.abs(trial) < limit && trial * middle > 0 ? trial : middle;
+    const taken = Math.abs(trial) < limit && trial > 0 === middle > 0 ? trial : middle;
     previous = taken === middle ? middle : step;
     step = taken;
     a = b;
