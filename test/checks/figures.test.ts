@@ -67,6 +67,14 @@ describe('no-pulse', () => {
 });
 
 describe('requirements', () => {
+  test('a miss of more than the limit is told in whole percent', () => {
+    const text = designOf('requirement-missed').replace('min: 15 mJ', 'max: 2 mJ');
+    const percent = Math.round((pulseOf(text).energy_J / 2e-3 - 1) * 100);
+    expect(percent).toBeGreaterThan(100);
+    const messages = findingsOf(text, 'requirement-missed').map(({ message }) => message);
+    expect(messages.join('\n')).toContain(`(${percent} %) above`);
+  });
+
   test('a miss is told in its unit and in percent of the limit', () => {
     const text = designOf('requirement-missed');
     const { energy_J, width_fwhm_s } = pulseOf(text);

@@ -15,7 +15,8 @@ function missed(requirement: RequirementFigures): Finding[] {
   const below = minimum !== undefined && predicted < minimum;
   const limit = below ? minimum : (maximum ?? predicted);
   const text = (value: number) => formatRequirement(name, value);
-  const by = limit === 0 ? '' : ` (${(Math.abs(predicted / limit - 1) * 100).toPrecision(2)} %)`;
+  const percent = Math.abs(predicted / limit - 1) * 100;
+  const by = limit === 0 ? '' : ` (${percent < 99.5 ? percent.toPrecision(2) : percent.toFixed(0)} %)`;
   return [
     {
       severity: 'error',

@@ -45,7 +45,7 @@ function isBlank({ contents }: Document.Parsed): boolean {
 
 function isReadable(text: string, findings: Findings): boolean {
   if (text.length > MAX_CHARACTERS) {
-    const message = `${text.length} characters are more than a design has; ${MAX_CHARACTERS} are read at most.`;
+    const message = `The file has more than ${MAX_CHARACTERS / 1e6} million characters, the most that a design may have: it is not read.`;
     findings.add('file-too-large', '', { start: 0, end: 0 }, message);
     return false;
   }
