@@ -180,6 +180,7 @@ describe('finding a material', () => {
   it('forgives case, spaces and raised or lowered figures, and nothing else', () => {
     expect(findMedium('nd: yvo₄')?.name).toBe('Nd:YVO4');
     expect(findMedium(' Nd³⁺:Y₃Al₅O₁₂ ')?.name).toBe('Nd:YAG');
+    expect(findMedium('Er:Yb phosphate glass')?.name).toBe('Er:Yb:phosphate glass');
     expect(findAbsorber('LiF:F₂⁻')?.name).toBe('LiF:F2-');
     expect(findAbsorber('LiF:F2−')?.name).toBe('LiF:F2-');
     for (const name of ['', 'Nd', 'Nd:YAGG', 'constructor', 'Nd:glass', 'Cr4+:YAG']) {

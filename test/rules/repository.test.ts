@@ -3,6 +3,7 @@ import { readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
+import { analyse } from '../../extension/core/analyse.ts';
 import { CAUTION } from '../../extension/core/report/caution.ts';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
@@ -34,6 +35,13 @@ describe('repository', () => {
     expect(start).toBeGreaterThan(0);
     expect(test).toBeGreaterThan(start);
     expect(readme.slice(0, start)).not.toMatch(/^##/m);
+  });
+
+  it('shows a design in the README that the tool itself has nothing against', () => {
+    const design = /```yaml\n(format: 1[\s\S]*?)```/.exec(text('README.md'))?.[1] ?? '';
+    const { prediction, problems } = analyse(design);
+    expect(problems).toEqual([]);
+    expect(prediction?.pulse?.energy_J).toBeGreaterThan(0.008);
   });
 
   it('ships the caution with the README and every readout', () => {

@@ -216,11 +216,11 @@ function byName<Row extends { name: string; composition: string; aliases: readon
   return rows.find((row) => [row.name, row.composition, ...row.aliases].some((known) => plain(known) === wanted));
 }
 
-/** `Nd:YVO₄` and `nd: yvo4` alike: compatibility forms folded, the minus sign made a hyphen. */
+/** `Nd:YVO₄`, `nd: yvo4` and `Nd YVO4` alike: compatibility forms folded, the minus sign made a hyphen. */
 function plain(name: string): string {
   return name
     .normalize('NFKC')
     .replace(/\u2212/g, '-')
-    .replace(/\s+/g, '')
+    .replace(/[\s:]+/g, '')
     .toLowerCase();
 }
