@@ -1,17 +1,11 @@
 import type { CodeAction } from 'vscode-languageserver-protocol';
-import type { Analysis } from '../core/analyse.ts';
 import type { TextRange } from '../core/report/problem.ts';
 import { diagnostic } from './diagnostics.ts';
-import type { ToRange } from './range.ts';
-
-export interface CodeActionContext {
-  readonly uri: string;
-  readonly toRange: ToRange;
-  readonly checksUri: string | undefined;
-}
+import type { Subject } from './subject.ts';
 
 /** The fixes of every problem that the selection touches; a problem's only fix is the preferred one. */
-export function codeActions(analysis: Analysis, selected: TextRange, context: CodeActionContext): CodeAction[] {
+export function codeActions(subject: Subject, selected: TextRange, checksUri: string | undefined): CodeAction[] {
+  const { analysis, uri, toRange } = subject;
   return analysis.problems
     .filter(({ range }) => range.start <= selected.end && selected.start <= range.end)
     .flatMap((problem) => {
@@ -20,9 +14,9 @@ export function codeActions(analysis: Analysis, selected: TextRange, context: Co
         ({ title, range, text }): CodeAction => ({
           title,
           kind: 'quickfix',
-          diagnostics: [diagnostic(problem, context.toRange, context.checksUri)],
+          diagnostics: [diagnostic(problem, toRange, checksUri)],
           isPreferred: fixes.length === 1,
-          edit: { changes: { [context.uri]: [{ range: context.toRange(range), newText: text }] } },
+          edit: { changes: { [uri]: [{ range: toRange(range), newText: text }] } },
         }),
       );
     });

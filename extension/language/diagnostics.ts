@@ -1,13 +1,13 @@
 import type { Diagnostic, DiagnosticSeverity } from 'vscode-languageserver-protocol';
-import type { Analysis } from '../core/analyse.ts';
 import type { Problem, Severity } from '../core/report/problem.ts';
 import type { ToRange } from './range.ts';
+import type { Subject } from './subject.ts';
 
 /** LSP's numbers: 1 error, 2 warning, 3 information. */
 const severities: Readonly<Record<Severity, DiagnosticSeverity>> = { error: 1, warning: 2, information: 3 };
 
 /** Every problem of the analysis; `checksUri` is where the sections that explain the codes can be opened. */
-export function diagnostics(analysis: Analysis, toRange: ToRange, checksUri?: string): Diagnostic[] {
+export function diagnostics({ analysis, toRange }: Subject, checksUri?: string): Diagnostic[] {
   return analysis.problems.map((problem) => diagnostic(problem, toRange, checksUri));
 }
 

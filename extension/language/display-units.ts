@@ -13,6 +13,8 @@ const prefixes: readonly (readonly [exponent: number, prefix: string])[] = [
 
 export interface DisplaySeries {
   readonly unit: string;
+  /** The unit in SI. */
+  readonly scale: number;
   readonly values: readonly number[];
 }
 
@@ -27,6 +29,7 @@ export function inDisplayUnit(values: readonly number[], unit: string, digits = 
   const decimals = Math.min(12, Math.max(0, digits - 1 - Math.floor(Math.log10(scaled || 1))));
   return {
     unit: `${prefix}${unit}`,
+    scale: Number(`1e${exponent}`),
     values: values.map((value) => Number((value / 10 ** exponent).toFixed(decimals))),
   };
 }

@@ -51,7 +51,7 @@ export function modelName(prediction: Prediction): string {
 
 function figure(label: string, value: number | undefined, kind: Kind): Figure {
   const text = show(value, kind);
-  return text === undefined ? { label } : { label, value: text };
+  return text === undefined ? { label } : { label, value: text, ...(value !== undefined && { amount: value }) };
 }
 
 function group(name: string, figures: readonly Figure[]): FigureGroup {

@@ -5,7 +5,7 @@ import type { TextRange } from '../core/report/problem.ts';
 import { filledIn } from './filled-in.ts';
 import { keyHelp } from './key-help.ts';
 import { code, escaped } from './markdown.ts';
-import type { ToRange } from './range.ts';
+import type { Subject } from './subject.ts';
 import { fullSummary, summary } from './summary.ts';
 import { requirementRow, surfaceRow } from './verdicts.ts';
 
@@ -13,7 +13,7 @@ import { requirementRow, surfaceRow } from './verdicts.ts';
 const headKeys: readonly string[] = ['title', 'format'];
 
 /** What is known of the key or value at an offset, and the pulse that the design gives; undefined elsewhere. */
-export function hover(analysis: Analysis, offset: number, toRange: ToRange): Hover | undefined {
+export function hover({ analysis, toRange }: Subject, offset: number): Hover | undefined {
   const node = analysis.design.nodeAt(offset);
   const place = node === undefined ? undefined : hoverPlace(node, offset);
   if (node === undefined || place === undefined) return undefined;

@@ -1,24 +1,20 @@
 import { type Analysis, waveform } from '../core/analyse.ts';
 import type { Problem } from '../core/report/problem.ts';
-import type { ProblemRow, ReadoutState, WaveformChart } from '../protocol/readout.ts';
+import type { Chart } from '../protocol/chart.ts';
+import type { ProblemRow, ReadoutState } from '../protocol/readout.ts';
 import { titleOf } from './design-title.ts';
 import { failureMessage } from './diagnostics.ts';
 import { inDisplayUnit } from './display-units.ts';
 import { figureGroups, headlineFigures, modelName } from './figures.ts';
+import type { Subject } from './subject.ts';
 import { requirementRow, surfaceRow } from './verdicts.ts';
 
 /** Enough that the curve looks smooth on a wide screen. */
 const chartPoints = 301;
 
-export interface ReadoutSubject {
-  readonly uri: string;
-  readonly version: number;
-  /** The line (from 1) of an offset of the text. */
-  lineOf(offset: number): number;
-}
-
 /** What the readout shows for one version of a design. */
-export function readout(analysis: Analysis, subject: ReadoutSubject): ReadoutState {
+export function readout(subject: Subject): ReadoutState {
+  const { analysis } = subject;
   const { prediction, problems } = analysis;
   const chart = prediction?.pulse === undefined ? undefined : waveformChart(analysis);
   return {
@@ -35,22 +31,26 @@ export function readout(analysis: Analysis, subject: ReadoutSubject): ReadoutSta
           validity: prediction.validity.map(({ message }) => message),
         }),
     ...(prediction?.pulse === undefined ? { absence: absence(problems) } : {}),
-    ...(chart === undefined ? {} : { waveform: chart }),
+    charts: chart === undefined ? [] : [chart],
   };
 }
 
 /** The same page after a fault of ours: no figure, and the reason why. */
-export function failedReadout(reason: string, subject: ReadoutSubject): ReadoutState {
-  const message = failureMessage(reason);
+export function failedReadout({ uri, version, failure }: Failure): ReadoutState {
+  const message = failureMessage(failure);
   return {
-    ...shell(subject, fileName(subject.uri)),
+    ...shell({ uri, version }, fileName(uri)),
     absence: message,
     problems: [{ severity: 'error', code: 'internal-failure', message, line: 1 }],
   };
 }
 
-function shell({ uri, version }: ReadoutSubject, title: string): ReadoutState {
-  const nothing = { groups: [], surfaces: [], requirements: [], validity: [], problems: [] };
+interface Failure extends Pick<Subject, 'uri' | 'version'> {
+  readonly failure: string;
+}
+
+function shell({ uri, version }: Pick<Subject, 'uri' | 'version'>, title: string): ReadoutState {
+  const nothing = { charts: [], groups: [], surfaces: [], requirements: [], validity: [], problems: [] };
   return { uri, version, title, headline: headlineFigures(undefined), ...nothing };
 }
 
@@ -69,8 +69,8 @@ function isNoValidityNote({ prediction }: Analysis): (problem: Problem) => boole
   return ({ code, message }) => !notes.has(`${code} ${message}`);
 }
 
-function problemRow({ severity, code, message, range }: Problem, { lineOf }: ReadoutSubject): ProblemRow {
-  return { severity, code, message, line: lineOf(range.start) };
+function problemRow({ severity, code, message, range }: Problem, { toRange }: Subject): ProblemRow {
+  return { severity, code, message, line: toRange(range).start.line + 1 };
 }
 
 /** Why there is no pulse: the first errors are what must be mended. */
@@ -83,7 +83,7 @@ function absence(problems: readonly Problem[]): string {
   return `No pulse is predicted: ${first.message}${others}`;
 }
 
-function waveformChart(analysis: Analysis): WaveformChart | undefined {
+function waveformChart(analysis: Analysis): Chart | undefined {
   const course = waveform(analysis, chartPoints);
   if (course === undefined || course.time_s.length === 0) return undefined;
   const time = inDisplayUnit(course.time_s, 's');
@@ -93,11 +93,17 @@ function waveformChart(analysis: Analysis): WaveformChart | undefined {
   const remaining =
     left === undefined ? '' : ` The gain falls to ${(left * 100).toFixed(0)} % of its value before the pulse.`;
   return {
-    timeUnit: time.unit,
-    time: time.values,
-    powerUnit: power.unit,
-    power: power.values,
-    inversion: course.inversion.map((value) => Number(value.toFixed(5))),
+    kind: 'lines',
+    id: 'waveform',
+    title: 'Waveform',
+    x: { label: 'Time from the peak', unit: time.unit, scale: time.scale, values: time.values, logarithmic: false },
+    left: { label: 'Output power', unit: power.unit, scale: power.scale },
+    right: { label: 'Inversion', unit: '', scale: 1 },
+    lines: [
+      { label: 'Output power', axis: 'left', values: power.values },
+      { label: 'Inversion', axis: 'right', values: course.inversion.map((value) => Number(value.toFixed(5))) },
+    ],
+    marks: [],
     summary: `Pulse waveform: output power rises to ${peak}, ${width} wide at half maximum, ${energy} in all.${remaining}`,
   };
 }

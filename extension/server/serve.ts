@@ -1,50 +1,88 @@
 import {
   CodeActionKind,
+  CodeLensRefreshRequest,
   type Connection,
   type InitializeResult,
+  InlayHintRefreshRequest,
   TextDocumentSyncKind,
   TextDocuments,
 } from 'vscode-languageserver';
 import { TextDocument } from 'vscode-languageserver-textdocument';
 import type { Analysis } from '../core/analyse.ts';
-import { codeActions } from '../language/code-actions.ts';
 import { diagnostics, internalFailure } from '../language/diagnostics.ts';
-import { hover } from '../language/hover.ts';
-import { rangeIn } from '../language/range.ts';
-import { failedReadout, readout } from '../language/readout.ts';
-import { isReadoutParams, serverOptions } from '../protocol/guard.ts';
-import { type AnalysedParams, analysedNotification, type ReadoutResult, readoutRequest } from '../protocol/requests.ts';
+import { headlineText } from '../language/headline.ts';
+import { serverOptions, settingsOf } from '../protocol/guard.ts';
+import {
+  type AnalysedParams,
+  analysedNotification,
+  defaultSettings,
+  type ServerOptions,
+  type Settings,
+} from '../protocol/requests.ts';
 import { createAnalyses } from './analyses.ts';
+import { createAnswers } from './answers.ts';
+import { answerEditor } from './editor-requests.ts';
 import { createPublisher } from './publisher.ts';
+import { answerReadout } from './readout-requests.ts';
 
 /** Serves the design language on a connection until its client ends it. */
 export function serve(connection: Connection, analyse: (text: string) => Analysis): void {
   const documents = new TextDocuments(TextDocument);
   const analyses = createAnalyses(documents, analyse);
-  let checksUri: string | undefined;
+  const answers = createAnswers(analyses, (uri) => documents.get(uri)?.version);
+  let options: ServerOptions = {};
+  let settings: Settings = defaultSettings;
+  let refreshes: readonly (() => Promise<void>)[] = [];
 
-  connection.onInitialize(({ initializationOptions }): InitializeResult => {
-    checksUri = serverOptions(initializationOptions).checksUri;
+  connection.onInitialize(({ initializationOptions, capabilities }): InitializeResult => {
+    options = serverOptions(initializationOptions);
+    settings = options.settings ?? defaultSettings;
+    refreshes = [
+      ...(capabilities.workspace?.codeLens?.refreshSupport
+        ? [() => connection.sendRequest(CodeLensRefreshRequest.type)]
+        : []),
+      ...(capabilities.workspace?.inlayHint?.refreshSupport
+        ? [() => connection.sendRequest(InlayHintRefreshRequest.type)]
+        : []),
+    ];
     return {
       serverInfo: { name: 'Giant Pulse' },
       capabilities: {
         textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
         hoverProvider: true,
         codeActionProvider: { codeActionKinds: [CodeActionKind.QuickFix] },
+        completionProvider: { triggerCharacters: [' ', ':', '{', ',', '\n'] },
+        codeLensProvider: { resolveProvider: false },
+        inlayHintProvider: { resolveProvider: false },
+        documentSymbolProvider: true,
+        definitionProvider: true,
+        foldingRangeProvider: true,
       },
     };
+  });
+  connection.onDidChangeConfiguration(({ settings: sent }: { readonly settings: unknown }) => {
+    settings = settingsOf(
+      typeof sent === 'object' && sent !== null && 'giantpulse' in sent ? sent.giantpulse : undefined,
+    );
+    for (const refresh of refreshes) void refresh();
   });
 
   const publisher = createPublisher((uri) => {
     const analysed = analyses.of(uri);
     if (analysed === undefined) return;
-    const { document, version } = analysed;
+    const { version } = analysed;
     const found =
       'failure' in analysed
-        ? [internalFailure(analysed.failure, checksUri)]
-        : diagnostics(analysed.analysis, rangeIn(document), checksUri);
+        ? [internalFailure(analysed.failure, options.checksUri)]
+        : diagnostics(analysed, options.checksUri);
     void connection.sendDiagnostics({ uri, version, diagnostics: found });
-    const params: AnalysedParams = { uri, version };
+    const params: AnalysedParams = {
+      uri,
+      version,
+      headline: 'failure' in analysed ? 'failed' : headlineText(analysed.analysis),
+      errors: found.filter(({ severity }) => severity === 1).length,
+      warnings: found.filter(({ severity }) => severity === 2).length,
+    };
     void connection.sendNotification(analysedNotification, params);
   });
   documents.onDidChangeContent(({ document }) => publisher.changed(document.uri));
@@ -54,30 +92,8 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
     void connection.sendDiagnostics({ uri, diagnostics: [] });
   });
 
-  connection.onHover(({ textDocument, position }) => {
-    const analysed = analyses.of(textDocument.uri);
-    if (analysed === undefined || 'failure' in analysed) return null;
-    const { document, analysis } = analysed;
-    return hover(analysis, document.offsetAt(position), rangeIn(document)) ?? null;
-  });
-
-  connection.onCodeAction(({ textDocument, range }) => {
-    const analysed = analyses.of(textDocument.uri);
-    if (analysed === undefined || 'failure' in analysed) return [];
-    const { document, analysis } = analysed;
-    const selected = { start: document.offsetAt(range.start), end: document.offsetAt(range.end) };
-    return codeActions(analysis, selected, { uri: document.uri, toRange: rangeIn(document), checksUri });
-  });
-
-  connection.onRequest(readoutRequest, (params: unknown): ReadoutResult => {
-    if (!isReadoutParams(params)) return null;
-    const analysed = analyses.of(params.uri);
-    if (analysed === undefined) return null;
-    const { document, version } = analysed;
-    const about = { uri: document.uri, version, lineOf: (offset: number) => document.positionAt(offset).line + 1 };
-    return 'failure' in analysed ? failedReadout(analysed.failure, about) : readout(analysed.analysis, about);
-  });
-
+  answerEditor(connection, answers, () => ({ ...options, settings }));
+  answerReadout(connection, answers);
   documents.listen(connection);
   connection.listen();
 }

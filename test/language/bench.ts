@@ -1,9 +1,10 @@
 import { readFileSync } from 'node:fs';
 import type { MarkupContent } from 'vscode-languageserver-protocol';
 import { TextDocument } from 'vscode-languageserver-textdocument';
-import { type Analysis, analyse } from '../../extension/core/analyse.ts';
+import { analyse } from '../../extension/core/analyse.ts';
 import { hover } from '../../extension/language/hover.ts';
-import { rangeIn } from '../../extension/language/range.ts';
+import type { Subject } from '../../extension/language/subject.ts';
+import { createAnalyses } from '../../extension/server/analyses.ts';
 
 export const transmitter = readFileSync(
   new URL('../host/workspace/transmitter.gainmodule.yaml', import.meta.url),
@@ -12,16 +13,19 @@ export const transmitter = readFileSync(
 
 export interface Bench {
   readonly document: TextDocument;
-  readonly analysis: Analysis;
+  /** What every feature is a function of. */
+  readonly subject: Subject;
   /** Offset of a piece of text, `by` characters into it. */
   at(text: string, by?: number): number;
 }
 
 export function bench(text: string): Bench {
   const document = TextDocument.create('file:///bench/a.gainmodule.yaml', 'gainmodule', 1, text);
+  const subject = createAnalyses({ get: () => document }, analyse).of(document.uri);
+  if (subject === undefined || 'failure' in subject) throw new Error(subject?.failure ?? 'not open');
   return {
     document,
-    analysis: analyse(text),
+    subject,
     at(wanted, by = 0) {
       const offset = text.indexOf(wanted);
       if (offset < 0) throw new Error(`no ${wanted}`);
@@ -31,8 +35,8 @@ export function bench(text: string): Bench {
 }
 
 /** The hover's Markdown and the text that it is about; undefined where there is none. */
-export function hoverAt({ analysis, document }: Bench, offset: number): { text: string; about: string } | undefined {
-  const found = hover(analysis, offset, rangeIn(document));
+export function hoverAt({ subject, document }: Bench, offset: number): { text: string; about: string } | undefined {
+  const found = hover(subject, offset);
   if (found?.range === undefined) return undefined;
   const { contents } = found;
   const isMarkup = (value: typeof contents): value is MarkupContent => typeof value === 'object' && 'kind' in value;

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { TextDocument } from 'vscode-languageserver-textdocument';
 import { type Analysis, analyse } from '../../extension/core/analyse.ts';
 import { createAnalyses, type VersionedText } from '../../extension/server/analyses.ts';
 
@@ -10,7 +11,7 @@ function bench(analyser: (text: string) => Analysis = analyse) {
     return analyser(text);
   });
   const put = (version: number, text: string): void => {
-    documents.set('a', { uri: 'a', version, getText: () => text });
+    documents.set('a', TextDocument.create('a', 'gainmodule', version, text));
   };
   return { analyses, documents, put, calls: () => calls };
 }

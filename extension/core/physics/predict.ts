@@ -19,8 +19,13 @@ export interface Outcome {
 /**
  * Predicts an actively switched module: the settled pulse, its train, the best coupling, surfaces and requirements.
  * Undefined for a passive or absent switch, which this release does not model. Conventions: `docs/model.md`.
+ * The optimum coupling takes some 30 pulses where the switch is slow, and can be left out.
  */
-export function predict(module: GainModule, requirements: readonly Requirement[]): Outcome | undefined {
+export function predict(
+  module: GainModule,
+  requirements: readonly Requirement[],
+  wanted: { readonly coupling: boolean } = { coupling: true },
+): Outcome | undefined {
   if (module.qSwitch.kind === 'saturable_absorber' || module.qSwitch.kind === 'none') return undefined;
   const cavity = cavityOf(module);
   const train = trainOf(cavity);
@@ -35,7 +40,7 @@ export function predict(module: GainModule, requirements: readonly Requirement[]
       ...(pulse && { pulse }),
       state: stateFigures(cavity, train, gain),
       train: trainFigures,
-      coupling: coupling(cavity, train),
+      coupling: wanted.coupling ? coupling(cavity, train) : {},
       surfaces: pulse
         ? module.surfaces.map((surface) => surfaceFigures(module, surface, pulse.energy_J, pulse.width_fwhm_s))
         : [],

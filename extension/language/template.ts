@@ -1,0 +1,4 @@
+/** The text of a new design. */
+export function template(): string {
+  return 'format: 1\n';
+}

@@ -1,0 +1,50 @@
+import type { Connection } from 'vscode-languageserver';
+import { exploration } from '../language/exploration.ts';
+import { exported } from '../language/export.ts';
+import { failedReadout, readout } from '../language/readout.ts';
+import { template } from '../language/template.ts';
+import { isExportParams, isReadoutParams } from '../protocol/guard.ts';
+import {
+  type ExplorationResult,
+  type ExportResult,
+  explorationRequest,
+  exportRequest,
+  type ReadoutResult,
+  readoutRequest,
+  type TemplateResult,
+  templateRequest,
+} from '../protocol/requests.ts';
+import { type Answers, pause } from './answers.ts';
+
+/** Answers our own requests: what the readout shows, its curves, exports, and the text of a new design. */
+export function answerReadout(connection: Connection, { own }: Answers): void {
+  const open = (params: unknown): string | undefined => (isReadoutParams(params) ? params.uri : undefined);
+
+  connection.onRequest(
+    readoutRequest,
+    own<ReadoutResult>(open, (analysed) => ('failure' in analysed ? failedReadout(analysed) : readout(analysed))),
+  );
+  connection.onRequest(
+    explorationRequest,
+    own<ExplorationResult>(open, async (analysed, _params, stillWanted) => {
+      if ('failure' in analysed) return null;
+      return (await exploration(analysed, afterPause(stillWanted))) ?? null;
+    }),
+  );
+  connection.onRequest(
+    exportRequest,
+    own<ExportResult>(open, async (analysed, params, stillWanted) => {
+      if ('failure' in analysed || !isExportParams(params)) return null;
+      const text = await exported(analysed, params, afterPause(stillWanted));
+      return text === undefined ? null : { version: analysed.version, text };
+    }),
+  );
+  connection.onRequest(templateRequest, (): TemplateResult => template());
+}
+
+function afterPause(stillWanted: () => boolean): () => Promise<boolean> {
+  return async () => {
+    await pause();
+    return stillWanted();
+  };
+}
