@@ -23,6 +23,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
     'extension/core/design',
     'extension/core/analyse.ts',
   ],
+  'extension/core/explore': ['extension/core'],
   'extension/core/analyse.ts': ['extension/core'],
   'extension/language': ['extension/core', 'extension/protocol'],
   'extension/server': ['extension/core', 'extension/language', 'extension/protocol'],

@@ -3,6 +3,7 @@ import type { ReadDesign } from '../design/read.ts';
 import { resolveDesign } from '../design/resolve.ts';
 import { wantedFigures } from '../design/wanted.ts';
 import { type Outcome, predict } from '../physics/predict.ts';
+import { steps } from './parameters.ts';
 
 /** A quantity of a design (by its path, whether or not the file writes it) at another value, SI. */
 export interface Change {
@@ -17,18 +18,13 @@ export interface Change {
  */
 export function vary(analysis: Analysis, changes: readonly Change[]): Outcome | undefined {
   if (analysis.outcome === undefined) return undefined;
-  const values = changes.reduce((all: object, { path, value }) => withValue(all, tokens(path), value), {
+  const values = changes.reduce((all: object, { path, value }) => withValue(all, steps(path), value), {
     ...analysis.design.values,
   });
   // The values keep the schema's shape: only quantities are replaced, by quantities.
   const design: ReadDesign = { ...analysis.design, values: values as ReadDesign['values'] };
   const { module } = resolveDesign(design);
   return module && predict(module, wantedFigures(design), { coupling: false });
-}
-
-/** `surfaces[0].beam_radius` as its steps. */
-function tokens(path: string): readonly (string | number)[] {
-  return path.split(/\.|(?=\[)/).map((token) => (token.startsWith('[') ? Number(token.slice(1, -1)) : token));
 }
 
 function withValue(inner: unknown, [step, ...rest]: readonly (string | number)[], value: number): object {
