@@ -1,3 +1,4 @@
+import { accept } from './checks/acceptance.ts';
 import type { CheckContext } from './checks/check.ts';
 import { CHECKS } from './checks/registry.ts';
 import { type ReadDesign, readDesign } from './design/read.ts';
@@ -25,7 +26,8 @@ export function analyse(text: string): Analysis {
   const resolved = resolveDesign(design);
   const problems = [...design.problems, ...resolved.problems];
   const { module, origins } = resolved;
-  if (!module) return { design, resolved, problems: inOrder(problems) };
+  const settled = (all: readonly Problem[], judged: boolean) => inOrder(accept(text, design, all, judged));
+  if (!module) return { design, resolved, problems: settled(problems, false) };
   const outcome = predict(module, wantedFigures(design));
   if (!outcome) {
     const path = 'q_switch.kind';
@@ -38,7 +40,7 @@ export function analyse(text: string): Analysis {
       path,
       range: design.rangeOf(path),
     };
-    return { design, resolved, problems: inOrder([...problems, unmodelled]) };
+    return { design, resolved, problems: settled([...problems, unmodelled], false) };
   }
   const found = runChecks({ design, origins, module, outcome });
   const validity = found.flatMap(({ severity, code, message }) =>
@@ -48,7 +50,7 @@ export function analyse(text: string): Analysis {
     design,
     resolved,
     prediction: { ...outcome.figures, validity },
-    problems: inOrder([...problems, ...found]),
+    problems: settled([...problems, ...found], true),
     outcome,
   };
 }

@@ -1,4 +1,5 @@
 import type { Diagnostic, DiagnosticSeverity } from 'vscode-languageserver-protocol';
+import { toldMessage } from '../core/report/findings-text.ts';
 import type { Problem, Severity } from '../core/report/problem.ts';
 import type { ToRange } from './range.ts';
 import type { Subject } from './subject.ts';
@@ -16,7 +17,7 @@ export function diagnostic(problem: Problem, toRange: ToRange, checksUri?: strin
     range: toRange(problem.range),
     severity: severities[problem.severity],
     source: 'Giant Pulse',
-    message: problem.message,
+    message: toldMessage(problem),
     ...codeOf(problem.code, checksUri),
   };
 }

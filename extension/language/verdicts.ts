@@ -27,8 +27,9 @@ function scaled(fluence: number | undefined): number | undefined {
 
 function verdictOf(path: string, problems: readonly Problem[]): Verdict {
   const about = problems.filter((problem) => problem.path === path || problem.path.startsWith(`${path}.`));
-  if (about.some(({ severity }) => severity === 'error')) return 'bad';
-  return about.some(({ severity }) => severity === 'warning') ? 'look' : 'good';
+  const severities = about.map(({ severity, accepted }) => accepted?.severity ?? severity);
+  if (severities.includes('error')) return 'bad';
+  return severities.includes('warning') ? 'look' : 'good';
 }
 
 export function requirementRow({ name, met, predicted, minimum, maximum }: RequirementFigures): RequirementRow {

@@ -25,5 +25,7 @@ export interface Check {
   /** Also the anchor of its section in `extension/docs/checks.md`. */
   readonly code: string;
   readonly title: string;
+  /** What it finds cannot be built, so that no reason can accept it. */
+  readonly impossible?: true;
   run(context: CheckContext): readonly Finding[];
 }

@@ -1,4 +1,5 @@
 import { READING_CODES } from '../design/codes.ts';
+import { ACCEPTANCE_CODES } from './acceptance.ts';
 import { CHECKS } from './registry.ts';
 
 /** Problems that arise between reading and prediction. */
@@ -13,6 +14,7 @@ const OWN_CODES = [{ code: 'internal-failure', title: 'The tool itself failed' }
 /** The closed list of problem codes, each with the title of its section in `extension/docs/checks.md`. */
 export const PROBLEM_CODES: readonly { readonly code: string; readonly title: string }[] = [
   ...CHECKS,
+  ...ACCEPTANCE_CODES,
   ...RESOLVING_CODES,
   ...READING_CODES,
   ...OWN_CODES,

@@ -5,6 +5,7 @@ import type { Check, Finding } from './check.ts';
 export const impossibleTiming: Check = {
   code: 'impossible-timing',
   title: 'The timing does not fit into the period',
+  impossible: true,
   run({ design, module: { pump, qSwitch } }) {
     const period = 1 / qSwitch.repetitionRate;
     const text = formatQuantity(period, 'time');

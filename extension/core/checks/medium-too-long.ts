@@ -5,6 +5,7 @@ import type { Check } from './check.ts';
 export const mediumTooLong: Check = {
   code: 'medium-too-long',
   title: 'The medium is longer than the resonator',
+  impossible: true,
   run: ({ module: { medium, resonator } }) =>
     medium.length <= resonator.length
       ? []

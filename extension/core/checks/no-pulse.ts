@@ -5,6 +5,7 @@ import type { Check, CheckContext, Finding } from './check.ts';
 export const noPulse: Check = {
   code: 'no-pulse',
   title: 'No pulse is emitted',
+  impossible: true,
   run: (context) => (context.outcome.figures.pulse ? [] : [reason(context)]),
 };
 

@@ -4,6 +4,7 @@ import type { Check } from './check.ts';
 export const tooManyExcited: Check = {
   code: 'too-many-excited',
   title: 'More ions are excited than there are',
+  impossible: true,
   run({ module: { medium }, outcome: { train } }) {
     if (medium.ionDensity === undefined) return [];
     const available = medium.ionDensity * medium.length;

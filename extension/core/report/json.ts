@@ -8,9 +8,10 @@ export function predictionJson(file: string, text: string, analysis: Analysis): 
   // The limits are the file's own, and the figure stands under its own name: name and verdict are enough.
   const requirements = prediction?.requirements.map(({ name, met }) => ({ name, ...(met !== undefined && { met }) }));
   const title = design.values.title;
-  const findings = problems.map(({ code, severity, message, path, range }) => ({
+  const findings = problems.map(({ code, severity, message, path, range, accepted }) => ({
     code,
     severity,
+    ...(accepted && { accepted: accepted.reason }),
     message,
     path,
     range: positionsOf(range, positionAt),

@@ -25,4 +25,6 @@ export interface Problem {
   readonly path: string;
   readonly range: TextRange;
   readonly fixes?: readonly Fix[];
+  /** Accepted by a comment of the design: why, and how bad it would be otherwise. It is then listed as a note. */
+  readonly accepted?: { readonly reason: string; readonly severity: Severity };
 }

@@ -4,6 +4,7 @@ import type { Surface } from '../physics/gain-module.ts';
 import type { Prediction } from '../physics/prediction.ts';
 import { formatPercent, formatQuantity } from '../quantity/format.ts';
 import { CAUTION } from './caution.ts';
+import { toldMessage } from './findings-text.ts';
 import { createPositions } from './position.ts';
 import { formatLimits, formatRequirement, requirementName } from './requirement-text.ts';
 import { oneLine, row, table, wrapped } from './text-layout.ts';
@@ -103,9 +104,9 @@ function findings(text: string, { problems }: Analysis): string[] {
   const positionAt = createPositions(text);
   return [
     'Findings',
-    ...problems.flatMap(({ range, severity, message, code }) => {
-      const { line, column } = positionAt(range.start);
-      return wrapped(`  ${line}:${column} ${severity}: ${message} [${code}]`, 4);
+    ...problems.flatMap((problem) => {
+      const { line, column } = positionAt(problem.range.start);
+      return wrapped(`  ${line}:${column} ${problem.severity}: ${oneLine(toldMessage(problem))} [${problem.code}]`, 4);
     }),
   ];
 }
