@@ -40,7 +40,7 @@ export function readDesign(text: string): ReadDesign {
   const findings = createFindings();
   const parsed = parseYaml(text, findings);
   const root = parsed && buildTree(text, parsed.document, findings);
-  const values = root === undefined ? {} : readRoot(root, parsed?.partial ?? false, findings);
+  const values = root === undefined ? {} : readRoot(text, root, parsed?.partial ?? false, findings);
   let index: ReadonlyMap<string, TreeNode> | undefined;
   const find = (path: string): TreeNode | undefined => {
     index ??= indexByPath(root);
@@ -67,8 +67,8 @@ export function readDesign(text: string): ReadDesign {
   };
 }
 
-function readRoot(root: TreeNode, partial: boolean, findings: Findings): Draft<GainModuleFile> {
-  checkStructure(root, GAIN_MODULE_SCHEMA, partial, findings);
+function readRoot(text: string, root: TreeNode, partial: boolean, findings: Findings): Draft<GainModuleFile> {
+  checkStructure(text, root, GAIN_MODULE_SCHEMA, partial, findings);
   const values = readValue(root, GAIN_MODULE_SCHEMA, findings) ?? {};
   // The type is generated from the schema that guided the reading.
   return values as Draft<GainModuleFile>;

@@ -1,3 +1,4 @@
+import { fillingFix, valueFix } from './fill.ts';
 import type { Findings } from './finding.ts';
 import { CONDITIONS } from './generated/schema.ts';
 import validate, { type ValidationError } from './generated/validate.js';
@@ -20,7 +21,13 @@ interface Fault {
  * Reports where a design departs from the schema's shape. `partial`: the text has syntax errors, so that what is
  * missing may only be unread.
  */
-export function checkStructure(root: TreeNode, schema: SchemaNode, partial: boolean, findings: Findings): void {
+export function checkStructure(
+  text: string,
+  root: TreeNode,
+  schema: SchemaNode,
+  partial: boolean,
+  findings: Findings,
+): void {
   if (validate(root.data)) return;
   const faults = (validate.errors ?? []).flatMap((error) => locate(error, root, schema));
   const misspelt = new Set<string>();
@@ -32,8 +39,16 @@ export function checkStructure(root: TreeNode, schema: SchemaNode, partial: bool
   }
   for (const fault of faults) {
     if (fault.node.kind === 'broken') continue;
-    report(fault, partial, misspelt, findings);
+    report({ text, root, partial, misspelt, findings }, fault);
   }
+}
+
+interface Reading {
+  readonly text: string;
+  readonly root: TreeNode;
+  readonly partial: boolean;
+  readonly misspelt: ReadonlySet<string>;
+  readonly findings: Findings;
 }
 
 function locate(error: ValidationError, root: TreeNode, schema: SchemaNode): Fault[] {
@@ -49,10 +64,11 @@ function locate(error: ValidationError, root: TreeNode, schema: SchemaNode): Fau
   return node === undefined ? [] : [{ error, node, schema: part, required }];
 }
 
-function report(fault: Fault, partial: boolean, misspelt: ReadonlySet<string>, findings: Findings): void {
+function report(reading: Reading, fault: Fault): void {
+  const { findings } = reading;
   switch (fault.error.keyword) {
     case 'required':
-      if (!partial) reportMissing(fault, misspelt, findings);
+      if (!reading.partial) reportMissing(reading, fault);
       break;
     case 'minProperties':
       reportEmpty(fault, findings);
@@ -63,10 +79,10 @@ function report(fault: Fault, partial: boolean, misspelt: ReadonlySet<string>, f
     case 'enum':
     case 'const':
       if (fault.node.kind === 'scalar') reportChoice(fault, findings);
-      else reportType(fault, findings);
+      else reportType(reading, fault);
       break;
     case 'type':
-      reportType(fault, findings);
+      reportType(reading, fault);
       break;
     case 'minimum':
     case 'maximum':
@@ -80,7 +96,7 @@ function conditionOf({ error }: Fault): Condition | undefined {
 }
 
 /** On the value that demands the key, if one does, else on the section that lacks it. */
-function reportMissing(fault: Fault, misspelt: ReadonlySet<string>, findings: Findings): void {
+function reportMissing({ text, root, misspelt, findings }: Reading, fault: Fault): void {
   const { error, node, schema } = fault;
   const key = error.params.missingProperty ?? '';
   if (misspelt.has(`${node.path} ${key}`)) return;
@@ -89,7 +105,8 @@ function reportMissing(fault: Fault, misspelt: ReadonlySet<string>, findings: Fi
   const name = placeName(node.path);
   const why = condition === undefined ? `${name} needs \`${key}\`` : `${name}: ${condition.because}`;
   const message = `${why}. Add ${exampleOf(key, keySchema(schema, key))}.`;
-  findings.add('missing-key', node.path, blamed?.written ?? node.value, message);
+  const fixes = fillingFix(text, root, node, key, schema);
+  findings.add('missing-key', node.path, blamed?.written ?? node.value, message, { fixes });
 }
 
 function reportEmpty({ node, schema }: Fault, findings: Findings): void {
@@ -120,11 +137,12 @@ function reportCount({ node, schema }: Fault, findings: Findings): void {
   findings.add('out-of-range', node.path, node.written, message);
 }
 
-function reportType({ node, schema, required }: Fault, findings: Findings): void {
+function reportType({ text, findings }: Reading, { node, schema, required }: Fault): void {
   if (schema === undefined) return;
   const code = node.kind === 'null' ? 'missing-value' : 'wrong-type';
   const where = node.kind === 'scalar' ? node.written : node.value;
-  findings.add(code, node.path, where, describeWrongType(node, schema, required));
+  const fixes = node.kind === 'null' ? valueFix(text, node, schema) : [];
+  findings.add(code, node.path, where, describeWrongType(node, schema, required), { fixes });
 }
 
 function reportChoice({ node, schema }: Fault, findings: Findings): void {

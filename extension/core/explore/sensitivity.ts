@@ -8,15 +8,33 @@ export const EFFECT_NAMES = ['energy', 'peak', 'width', 'margin'] as const;
 
 export type EffectName = (typeof EFFECT_NAMES)[number];
 
-/** Relative change of each figure per relative change of a value: ∂ln(figure)/∂ln(value), without unit. */
-export type Effects = Readonly<Partial<Record<EffectName, number>>>;
+/** A predicted number, SI; undefined where it does not apply. */
+export type FigureOf = (outcome: Outcome) => number | undefined;
 
+/** What a design does a little above and below one of its values. */
+export interface Around {
+  readonly path: string;
+  /** SI. */
+  readonly value: number;
+  readonly here: Outcome;
+  /** At `1 + STEP` and `1 - STEP` of the value; absent where that is not allowed or gives no pulse. */
+  readonly above?: Outcome;
+  readonly below?: Outcome;
+}
+
+/** Relative change of a figure per relative change of a value: ∂ln(figure)/∂ln(value), without unit. */
+export interface Slope {
+  readonly slope: number;
+  /** It is that of an increase; a decrease does otherwise, since a limit or a switching time lies just here. */
+  readonly oneSided: boolean;
+}
+
+/** Slopes of the figures that matter most. */
 export interface Sensitivity {
   readonly path: string;
   /** SI. */
   readonly value: number;
-  readonly effects: Effects;
-  /** The effects are those of an increase; a decrease does otherwise, since a limit or a switching time lies just here. */
+  readonly effects: Readonly<Partial<Record<EffectName, number>>>;
   readonly oneSided: boolean;
 }
 
@@ -26,66 +44,64 @@ const STEP = 1e-3;
 const KINK = { relative: 0.05, absolute: 0.005 } as const;
 
 /**
- * How the figures of a design follow one of its values, from central differences of the whole model, defaults and table
- * figures following as they would in the file. Undefined where there is no pulse, the path is no number that the pulse
- * can depend on, or the number is 0, which has no relative change.
+ * Two more predictions, defaults and table figures following as they would in the file. Undefined where there is no
+ * pulse, the path is no number that a pulse can depend on, or the number is 0, which has no relative change.
  */
-export function sensitivityOf(analysis: Analysis, path: string): Sensitivity | undefined {
-  const { outcome, design } = analysis;
+export function around(analysis: Analysis, path: string): Around | undefined {
+  const { outcome: here, design } = analysis;
   const parameter = parameterAt(analysis, path);
-  if (outcome?.figures.pulse === undefined || parameter === undefined || parameter.value === 0) return undefined;
+  if (here?.figures.pulse === undefined || parameter === undefined || parameter.value === 0) return undefined;
   const { value } = parameter;
-  const base = figuresOf(outcome, outcome);
-  const quotients = (side: 1 | -1): Effects | undefined => {
-    const changed = value * (1 + side * STEP);
+  const at = (changed: number): Outcome | undefined => {
     const varied = allows(design, path, changed) ? vary(analysis, [{ path, value: changed }]) : undefined;
-    return varied?.figures.pulse && quotient(base, figuresOf(varied, outcome), side * STEP);
+    return varied?.figures.pulse && varied;
   };
-  const above = quotients(1);
-  const below = quotients(-1);
-  if (above === undefined || below === undefined) {
-    const known = above ?? below;
-    return known && { path, value, effects: known, oneSided: true };
+  const above = at(value * (1 + STEP));
+  const below = at(value * (1 - STEP));
+  return { path, value, here, ...(above && { above }), ...(below && { below }) };
+}
+
+/** From the central difference of the whole model; undefined where the figure does not apply or nothing lies beside. */
+export function slopeOf({ here, above, below }: Around, figure: FigureOf): Slope | undefined {
+  const base = figure(here);
+  const quotient = (outcome: Outcome | undefined, step: number): number | undefined => {
+    const changed = outcome && figure(outcome);
+    const slope = base === undefined || changed === undefined ? Number.NaN : (changed / base - 1) / step;
+    return Number.isFinite(slope) ? slope : undefined;
+  };
+  const right = quotient(above, STEP);
+  const left = quotient(below, -STEP);
+  if (right === undefined || left === undefined) {
+    const known = right ?? left;
+    return known === undefined ? undefined : { slope: known, oneSided: true };
   }
-  const oneSided = EFFECT_NAMES.some((name) => kinked(above[name], below[name]));
-  return { path, value, effects: oneSided ? above : mean(above, below), oneSided };
+  const kink = KINK.absolute + KINK.relative * Math.max(Math.abs(right), Math.abs(left));
+  const oneSided = Math.abs(right - left) > kink;
+  return { slope: oneSided ? right : (right + left) / 2, oneSided };
+}
+
+/** How energy, peak, width and the tightest margin follow a value. */
+export function sensitivityOf(near: Around): Sensitivity {
+  const figures = effectFigures(near.here);
+  const effects: Partial<Record<EffectName, number>> = {};
+  let oneSided = false;
+  for (const name of EFFECT_NAMES) {
+    const found = slopeOf(near, figures[name]);
+    if (found === undefined) continue;
+    effects[name] = found.slope;
+    oneSided ||= found.oneSided;
+  }
+  return { path: near.path, value: near.value, effects, oneSided };
 }
 
 /** The margin is always the one that is tightest in the design as it stands. */
-function figuresOf(outcome: Outcome, present: Outcome): Effects {
-  const { pulse } = outcome.figures;
+function effectFigures(present: Outcome): Readonly<Record<EffectName, FigureOf>> {
   const tightest = tightestMargin(present);
-  const margin = marginsOf(outcome).find(({ kind, path }) => kind === tightest?.kind && path === tightest.path);
   return {
-    ...(pulse && { energy: pulse.energy_J, peak: pulse.peak_power_W, width: pulse.width_fwhm_s }),
-    ...(margin && { margin: margin.value }),
+    energy: ({ figures }) => figures.pulse?.energy_J,
+    peak: ({ figures }) => figures.pulse?.peak_power_W,
+    width: ({ figures }) => figures.pulse?.width_fwhm_s,
+    margin: (outcome) =>
+      marginsOf(outcome).find(({ kind, path }) => kind === tightest?.kind && path === tightest.path)?.value,
   };
-}
-
-function quotient(base: Effects, changed: Effects, step: number): Effects {
-  return each((name) => {
-    const [before, after] = [base[name], changed[name]];
-    return before === undefined || after === undefined ? undefined : (after / before - 1) / step;
-  });
-}
-
-function mean(above: Effects, below: Effects): Effects {
-  return each((name) => {
-    const [right, left] = [above[name], below[name]];
-    return right === undefined || left === undefined ? undefined : (right + left) / 2;
-  });
-}
-
-function each(figureOf: (name: EffectName) => number | undefined): Effects {
-  const effects: Partial<Record<EffectName, number>> = {};
-  for (const name of EFFECT_NAMES) {
-    const value = figureOf(name);
-    if (value !== undefined && Number.isFinite(value)) effects[name] = value;
-  }
-  return effects;
-}
-
-function kinked(right: number | undefined, left: number | undefined): boolean {
-  if (right === undefined || left === undefined) return false;
-  return Math.abs(right - left) > KINK.absolute + KINK.relative * Math.max(Math.abs(right), Math.abs(left));
 }

@@ -1,9 +1,10 @@
 /**
- * A root of f between two ends where f changes sign, by Brent's method, to about 1e-14 of the bracket's scale.
+ * A root of f between two ends where f changes sign, by Brent's method, to about 1e-14 of the bracket's scale, or to
+ * `precision` of itself.
  * Undefined where the signs do not differ or f is not finite there.
  * Source: R. P. Brent, Algorithms for Minimization without Derivatives (1973), ch. 4.
  */
-export function rootBetween(f: (x: number) => number, from: number, to: number): number | undefined {
+export function rootBetween(f: (x: number) => number, from: number, to: number, precision = 2e-15): number | undefined {
   let a = from;
   let b = to;
   let fa = f(a);
@@ -20,7 +21,7 @@ export function rootBetween(f: (x: number) => number, from: number, to: number):
       [a, b, c] = [b, c, b];
       [fa, fb, fc] = [fb, fc, fb];
     }
-    const tolerance = 2e-15 * Math.abs(b);
+    const tolerance = precision * Math.abs(b);
     const middle = (c - b) / 2;
     if (Math.abs(middle) <= tolerance) break;
     const trial = interpolate(a, b, c, fa, fb, fc);
