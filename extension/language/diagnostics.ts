@@ -1,18 +1,33 @@
 import type { Diagnostic, DiagnosticSeverity } from 'vscode-languageserver-protocol';
 import { toldMessage } from '../core/report/findings-text.ts';
 import type { Problem, Severity } from '../core/report/problem.ts';
-import type { ToRange } from './range.ts';
+import { relatedTo } from './related.ts';
 import type { Subject } from './subject.ts';
 
 /** LSP's numbers: 1 error, 2 warning, 3 information. */
 const severities: Readonly<Record<Severity, DiagnosticSeverity>> = { error: 1, warning: 2, information: 3 };
 
 /** Every problem of the analysis; `checksUri` is where the sections that explain the codes can be opened. */
-export function diagnostics({ analysis, toRange }: Subject, checksUri?: string): Diagnostic[] {
-  return analysis.problems.map((problem) => diagnostic(problem, toRange, checksUri));
+export function diagnostics(subject: Subject, checksUri?: string): Diagnostic[] {
+  return subject.analysis.problems.map((problem) => diagnostic(subject, problem, checksUri));
 }
 
-export function diagnostic(problem: Problem, toRange: ToRange, checksUri?: string): Diagnostic {
+/** The same with the places that each problem hangs on, which takes more predictions; undefined where there are none. */
+export function relatedDiagnostics(subject: Subject, checksUri?: string): Diagnostic[] | undefined {
+  const found = subject.analysis.problems.map((problem) => ({ problem, related: relatedTo(subject, problem) }));
+  if (found.every(({ related }) => related.length === 0)) return undefined;
+  return found.map(({ problem, related }) => ({
+    ...diagnostic(subject, problem, checksUri),
+    ...(related.length > 0 && {
+      relatedInformation: related.map(({ range, message }) => ({
+        location: { uri: subject.uri, range: subject.toRange(range) },
+        message,
+      })),
+    }),
+  }));
+}
+
+export function diagnostic({ toRange }: Subject, problem: Problem, checksUri?: string): Diagnostic {
   return {
     range: toRange(problem.range),
     severity: severities[problem.severity],

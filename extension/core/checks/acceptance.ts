@@ -34,8 +34,7 @@ export function accept(text: string, design: ReadDesign, problems: readonly Prob
   if (!text.includes('accept')) return [...problems];
   const acceptances = acceptancesIn(text, design.root);
   if (acceptances.length === 0) return [...problems];
-  const acceptable = new Set(['unusual-value', ...CHECKS.flatMap((check) => (check.impossible ? [] : [check.code]))]);
-  const valid = acceptances.filter(({ code, reason }) => reason !== '' && acceptable.has(code));
+  const valid = acceptances.filter(({ code, reason }) => reason !== '' && isAcceptable(code));
   const used = new Set<Acceptance>();
   const settled = problems.map((problem): Problem => {
     const line = lineStart(text, problem.range.start);
@@ -47,9 +46,18 @@ export function accept(text: string, design: ReadDesign, problems: readonly Prob
   });
   const about = (one: Acceptance): Problem[] => {
     if (valid.includes(one)) return judged && !used.has(one) ? [unused(one, problems)] : [];
-    return [invalid(one, acceptable)];
+    return [invalid(one)];
   };
   return [...settled, ...acceptances.flatMap(about)];
+}
+
+/** Findings about a design that could be built as it is, and values that are merely unusual. */
+export function isAcceptable(code: string): boolean {
+  return acceptableCodes().includes(code);
+}
+
+function acceptableCodes(): string[] {
+  return ['unusual-value', ...CHECKS.flatMap((check) => (check.impossible ? [] : [check.code]))];
 }
 
 function acceptancesIn(text: string, root: TreeNode | undefined): Acceptance[] {
@@ -100,9 +108,9 @@ function unused({ code, range }: Acceptance, problems: readonly Problem[]): Prob
   return { code: 'acceptance-unused', severity: 'warning', message, path: '', range, fixes: [removal(range)] };
 }
 
-function invalid({ code, reason, range, codeRange }: Acceptance, acceptable: ReadonlySet<string>): Problem {
+function invalid({ code, range, codeRange }: Acceptance): Problem {
   const problem = { code: 'acceptance-invalid', severity: 'warning', path: '' } as const;
-  if (acceptable.has(code) && reason === '') {
+  if (isAcceptable(code)) {
     const message = `An acceptance needs a reason: \`# accept ${code}: why this can stand\`. Without one it accepts nothing.`;
     return { ...problem, message, range };
   }
@@ -110,7 +118,7 @@ function invalid({ code, reason, range, codeRange }: Acceptance, acceptable: Rea
     const message = `\`${code}\` cannot be accepted: what it finds cannot be built. Change the design.`;
     return { ...problem, message, range: codeRange };
   }
-  const near = nearest(code, [...acceptable]);
+  const near = nearest(code, acceptableCodes());
   const fixes: Fix[] = near ? [{ title: `Change to \`${near}\``, range: codeRange, text: near }] : [];
   const hint = near ? `did you mean \`${near}\`?` : 'an invalid design, and what is no check, cannot be.';
   return { ...problem, message: `\`${clip(code)}\` is nothing that can be accepted: ${hint}`, range: codeRange, fixes };

@@ -22,16 +22,17 @@ export interface Rewriting {
   readonly edit: Omit<Fix, 'title'>;
 }
 
+export type Rounding = 'up' | 'down' | 'nearest';
+
 /**
- * Writes a value in the unit that the path has in the text, rounded to `digits` significant digits, away from what is
- * written now (`up`: to larger values). Undefined where the text can't be edited there, or has no proportional unit.
+ * Writes a value in the unit that the path has in the text, rounded to `digits` significant digits. Undefined where the text can't be edited there, or has no proportional unit.
  */
 export function rewriting(
   analysis: Analysis,
   path: string,
   value: number,
   digits: number,
-  up: boolean,
+  round: Rounding,
 ): Rewriting | undefined {
   const node = editableScalar(analysis, path);
   const schema = analysis.design.schemaOf(path);
@@ -41,7 +42,7 @@ export function rewriting(
   const number = NUMBER.exec(node.text.trimStart())?.[0];
   if ('problem' in read || number === undefined || !(read.quantity.written > 0) || !(value > 0)) return undefined;
   const { quantity } = read;
-  const text = plain(roundedAway((value / quantity.value) * quantity.written, digits, up));
+  const text = plain(rounded((value / quantity.value) * quantity.written, digits, round));
   const shown = quantity.unit === '' ? text : `${text} ${quantity.unit}`;
   const again = readQuantity(shown, schema.dimension);
   if ('problem' in again) return undefined;
@@ -49,11 +50,11 @@ export function rewriting(
   return { value: again.quantity.value, shown, edit: { range: { start, end: start + number.length }, text } };
 }
 
-/** To so many significant digits, up or down; what is within a millionth of a step counts as on it. */
-function roundedAway(value: number, digits: number, up: boolean): number {
+/** What is within a millionth of a step counts as on it. */
+function rounded(value: number, digits: number, round: Rounding): number {
   const step = 10 ** (Math.floor(Math.log10(value)) + 1 - digits);
   const steps = value / step;
-  const whole = up ? Math.ceil(steps - 1e-6) : Math.floor(steps + 1e-6);
+  const whole = { up: Math.ceil(steps - 1e-6), down: Math.floor(steps + 1e-6), nearest: Math.round(steps) }[round];
   return Number((whole * step).toPrecision(digits + 2));
 }
 

@@ -14,8 +14,10 @@ export interface Solution extends Rewriting {
 /** How far a goal is from being reached: negative where it is missed, 0 where it is just reached; undefined where nothing can be said. */
 export type Goal = (outcome: Outcome) => number | undefined;
 
-/** Relative changes tried before the search gives up: what lies beyond is another design, not a repair. */
+/** Factors tried before the search gives up: what lies beyond is another design, not a repair. */
 const REACH = [1.02, 1.05, 1.1, 1.2, 1.35, 1.5, 1.75, 2, 2.5, 3] as const;
+/** For a fraction the factors are those of x/(1 − x), so that nine tenths and 99.9 % are both within reach. */
+const REACH_OF_FRACTION = [...REACH, 5, 10, 30, 100, 300, 1000, 3000, 10_000] as const;
 const DIGITS = [3, 4, 5] as const;
 /** Finer than the finest rounding. */
 const PRECISION = 1e-7;
@@ -23,7 +25,7 @@ const PRECISION = 1e-7;
 /**
  * The value nearest to the present one with which a goal is reached, rounded to the side that reaches it and predicted
  * again as rounded. `direction` 1 raises it, -1 lowers it. Undefined where the goal is not reached within a factor of 3,
- * the schema's limits or its usual range, or where the text can't be edited.
+ * the schema's limits and its usual range, or where the text can't be edited.
  */
 export function solve(analysis: Analysis, path: string, goal: Goal, direction: 1 | -1): Solution | undefined {
   const present = parameterAt(analysis, path);
@@ -36,8 +38,9 @@ export function solve(analysis: Analysis, path: string, goal: Goal, direction: 1
   };
   let near = present.value;
   if (!((goal(outcome) ?? 0) < 0)) return undefined;
-  for (const factor of REACH) {
-    const far = present.value * factor ** direction;
+  const fraction = isFraction(analysis, path);
+  for (const factor of fraction ? REACH_OF_FRACTION : REACH) {
+    const far = fraction ? moved(present.value, factor ** direction) : present.value * factor ** direction;
     const reached = at(far);
     if (reached === undefined) return undefined;
     if (reached >= 0) {
@@ -52,11 +55,23 @@ export function solve(analysis: Analysis, path: string, goal: Goal, direction: 1
 /** As few digits as reach the goal; the prediction is that of the rounded value. */
 function rounded(analysis: Analysis, path: string, exact: number, goal: Goal, direction: 1 | -1): Solution | undefined {
   for (const digits of DIGITS) {
-    const written = rewriting(analysis, path, exact, digits, direction > 0);
+    const written = rewriting(analysis, path, exact, digits, direction > 0 ? 'up' : 'down');
     const outcome = written && vary(analysis, [{ path, value: written.value }]);
     if (written && outcome && (goal(outcome) ?? -1) >= 0) return { ...written, path, outcome };
   }
   return undefined;
+}
+
+/** A ratio that can't exceed 1. */
+function isFraction({ design }: Analysis, path: string): boolean {
+  const schema = design.schemaOf(path);
+  if (schema?.kind !== 'quantity' || schema.dimension !== 'ratio') return false;
+  return schema.limits.some(({ bound, value }) => (bound === 'below' || bound === 'at most') && value <= 1);
+}
+
+function moved(fraction: number, factor: number): number {
+  const odds = (fraction / (1 - fraction)) * factor;
+  return odds / (1 + odds);
 }
 
 function isUsual({ design }: Analysis, path: string, value: number): boolean {
