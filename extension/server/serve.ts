@@ -9,8 +9,9 @@ import {
 } from 'vscode-languageserver';
 import { TextDocument } from 'vscode-languageserver-textdocument';
 import type { Analysis } from '../core/analyse.ts';
-import { diagnostics, internalFailure } from '../language/diagnostics.ts';
+import { diagnostics, internalFailure, relatedDiagnostics } from '../language/diagnostics.ts';
 import { headlineText } from '../language/headline.ts';
+import type { Subject } from '../language/subject.ts';
 import { serverOptions, settingsOf } from '../protocol/guard.ts';
 import {
   type AnalysedParams,
@@ -21,6 +22,7 @@ import {
 } from '../protocol/requests.ts';
 import { createAnalyses } from './analyses.ts';
 import { createAnswers } from './answers.ts';
+import { deepen } from './deepening.ts';
 import { answerEditor } from './editor-requests.ts';
 import { createPublisher } from './publisher.ts';
 import { answerReadout } from './readout-requests.ts';
@@ -84,7 +86,14 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
       warnings: found.filter(({ severity }) => severity === 2).length,
     };
     void connection.sendNotification(analysedNotification, params);
+    if (!('failure' in analysed)) void publishRelated(analysed);
   });
+  const publishRelated = async (subject: Subject): Promise<void> => {
+    const { uri, version } = subject;
+    if (!(await deepen(subject, () => documents.get(uri)?.version === version))) return;
+    const related = relatedDiagnostics(subject, options.checksUri);
+    if (related !== undefined) void connection.sendDiagnostics({ uri, version, diagnostics: related });
+  };
   documents.onDidChangeContent(({ document }) => publisher.changed(document.uri));
   documents.onDidClose(({ document: { uri } }) => {
     publisher.closed(uri);

@@ -1,7 +1,10 @@
 import { describe, expect, test } from 'vitest';
+import type { Analysis } from '../../extension/core/analyse.ts';
 import { createExplorer } from '../../extension/core/explore/explorer.ts';
-import { EFFECT_NAMES, sensitivityOf } from '../../extension/core/explore/sensitivity.ts';
+import { EFFECT_NAMES } from '../../extension/core/explore/sensitivity.ts';
 import { analysed, demo, pulseOf, quick } from './designs.ts';
+
+const sensitivityOf = (analysis: Analysis, path: string) => createExplorer(analysis).sensitivity(path);
 
 const written = [
   ['pump.power', 'power: 600 W ± 3 %', (k: number) => `power: ${600 * k} W ± 3 %`],

@@ -101,3 +101,72 @@ test('outside every key and in text that is no design there is none', () => {
   expect(hoverAt(bench('\u0000\u0001'), 1)).toBeUndefined();
   expect(hoverAt(sound, transmitter.length)).toBeUndefined();
 });
+
+describe('the value', () => {
+  test.each([
+    ['length: 60 mm', '`60 mm` = 0.06 m'],
+    ['power: 600 W', '`600 W`\n'],
+    ['output_reflectivity: 50 %', '`50 %` = 0.5'],
+    ['emission_cross_section: 2.8e-19 cm2', '= 2.8e-23 m²'],
+  ])('of %s in SI', (line, shown) => {
+    expect(`${hoverAt(sound, sound.at(line))?.text}\n`).toContain(shown);
+  });
+
+  test('with its tolerance', () => {
+    const here = bench(transmitter.replace('length: 180 mm', 'length: 180 mm ± 0.5 mm'));
+    expect(hoverAt(here, here.at('length: 180'))?.text).toContain('= 0.18 ± 0.0005 m');
+  });
+});
+
+describe('sensitivity', () => {
+  test('to the pump power: +1 % of it moves energy by what two predictions of the text say', () => {
+    const text = hoverAt(sound, sound.at('power: 600'))?.text ?? '';
+    const row = /\| \+1 % \| \+([\d.]+) % \| \+([\d.]+) % \| −([\d.]+) % \| −([\d.]+) % \|/.exec(text);
+    const energy = (watts: number) =>
+      bench(transmitter.replace('power: 600 W', `power: ${watts} W`)).subject.analysis.prediction?.pulse?.energy_J ?? 0;
+    expect(Number(row?.[1])).toBeCloseTo((energy(603) / energy(597) - 1) * 100, 1);
+    expect(text).not.toContain('percentage point');
+  });
+
+  test('to reflectivity and loss, also for a percentage point', () => {
+    for (const key of ['output_reflectivity', 'round_trip_loss']) {
+      expect(hoverAt(sound, sound.at(key))?.text).toMatch(/\| \+1 percentage point \|/);
+    }
+    const text = hoverAt(sound, sound.at('output_reflectivity'))?.text ?? '';
+    const rows = [...text.matchAll(/\| \+1 (?:%|percentage point) \| ([+−][\d.]+) %/g)].map((match) =>
+      Number(match[1]?.replace('−', '-')),
+    );
+    // One percentage point of 50 % is 2 % of it.
+    expect(rows[1]! / rows[0]!).toBeCloseTo(2, 0);
+  });
+
+  test('tells the spread that tolerances cause, and which one rules', () => {
+    const here = bench(
+      transmitter.replace('600 W', '600 W ± 3 %').replace('length: 180 mm', 'length: 180 mm ± 0.5 mm'),
+    );
+    const text = hoverAt(here, here.at('power: 600'))?.text ?? '';
+    expect(text).toMatch(/Its tolerance alone: energy ± \d/);
+    expect(text).toMatch(/All tolerances, root sum of squares: energy ± [\d.]+ % \(all of it from `pump\.power`\)/);
+    for (const place of ['title:', 'pulse_width: { max']) {
+      expect(hoverAt(here, here.at(place))?.text).toContain('All tolerances, root sum of squares');
+    }
+  });
+
+  test('is left out where there is no pulse', () => {
+    const below = bench(transmitter.replace('power: 600 W', 'power: 6 W'));
+    expect(hoverAt(below, below.at('power: 6'))?.text).not.toContain('| +1 %');
+  });
+});
+
+describe('the property table', () => {
+  test('is quoted with source and how far sources disagree', () => {
+    const text = hoverAt(sound, sound.at('emission_cross_section'))?.text ?? '';
+    expect(text).toMatch(
+      /Property table, Nd:YAG at 1064 nm: [\d.]+e-19 cm² \(published values from [\d.e-]+ cm² to [\d.e-]+ cm²\)/,
+    );
+  });
+
+  test('tells the lines of the material', () => {
+    expect(hoverAt(sound, sound.at('material: Nd'))?.text).toMatch(/lines at .*1064 nm/);
+  });
+});
