@@ -10,6 +10,8 @@ const IN_POINTS = /(reflectivity|loss|transmission)$/;
 export function sensitivityHelp({ explorer }: Subject, path: string): readonly string[] {
   const found = explorer.sensitivity(path);
   if (found === undefined || Object.keys(found.effects).length === 0) return [];
+  const still = Object.values(found.effects).every((effect) => Math.abs(effect) < 1e-4);
+  if (still) return ['A small change of it leaves the pulse and the tightest margin as they are.'];
   const blocks = [table(found, path)];
   if (found.oneSided)
     blocks.push('For an increase: a decrease does otherwise, since a limit or another time lies just here.');
