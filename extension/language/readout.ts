@@ -1,22 +1,19 @@
-import { type Analysis, waveform } from '../core/analyse.ts';
+import type { Analysis } from '../core/analyse.ts';
 import type { Problem } from '../core/report/problem.ts';
-import type { Chart } from '../protocol/chart.ts';
 import type { ProblemRow, ReadoutState } from '../protocol/readout.ts';
+import { surfacesChart } from './charts/surfaces-chart.ts';
+import { waveformChart } from './charts/waveform-chart.ts';
 import { titleOf } from './design-title.ts';
 import { failureMessage } from './diagnostics.ts';
-import { inDisplayUnit } from './display-units.ts';
 import { figureGroups, headlineFigures, modelName } from './figures.ts';
 import type { Subject } from './subject.ts';
 import { requirementRow, surfaceRow } from './verdicts.ts';
-
-/** Enough that the curve looks smooth on a wide screen. */
-const chartPoints = 301;
 
 /** What the readout shows for one version of a design. */
 export function readout(subject: Subject): ReadoutState {
   const { analysis } = subject;
   const { prediction, problems } = analysis;
-  const chart = prediction?.pulse === undefined ? undefined : waveformChart(analysis);
+  const charts = [waveformChart(analysis), surfacesChart(analysis)].filter((chart) => chart !== undefined);
   return {
     ...shell(subject, titleOf(analysis.design) ?? fileName(subject.uri)),
     headline: headlineFigures(prediction),
@@ -31,7 +28,7 @@ export function readout(subject: Subject): ReadoutState {
           validity: prediction.validity.map(({ message }) => message),
         }),
     ...(prediction?.pulse === undefined ? { absence: absence(problems) } : {}),
-    charts: chart === undefined ? [] : [chart],
+    charts,
   };
 }
 
@@ -69,8 +66,9 @@ function isNoValidityNote({ prediction }: Analysis): (problem: Problem) => boole
   return ({ code, message }) => !notes.has(`${code} ${message}`);
 }
 
-function problemRow({ severity, code, message, range }: Problem, { toRange }: Subject): ProblemRow {
-  return { severity, code, message, line: toRange(range).start.line + 1 };
+function problemRow({ severity, code, message, range, accepted }: Problem, { toRange }: Subject): ProblemRow {
+  const line = toRange(range).start.line + 1;
+  return { severity, code, message, line, ...(accepted && { accepted: accepted.reason }) };
 }
 
 /** Why there is no pulse: the first errors are what must be mended. */
@@ -81,29 +79,4 @@ function absence(problems: readonly Problem[]): string {
   const more = errors.length - 1;
   const others = more === 0 ? '' : ` (and ${more} more error${more === 1 ? '' : 's'}, below)`;
   return `No pulse is predicted: ${first.message}${others}`;
-}
-
-function waveformChart(analysis: Analysis): Chart | undefined {
-  const course = waveform(analysis, chartPoints);
-  if (course === undefined || course.time_s.length === 0) return undefined;
-  const time = inDisplayUnit(course.time_s, 's');
-  const power = inDisplayUnit(course.power_W, 'W');
-  const [energy, peak, width] = headlineFigures(analysis.prediction).map(({ value }) => value ?? 'not predicted');
-  const left = course.inversion.at(-1);
-  const remaining =
-    left === undefined ? '' : ` The gain falls to ${(left * 100).toFixed(0)} % of its value before the pulse.`;
-  return {
-    kind: 'lines',
-    id: 'waveform',
-    title: 'Waveform',
-    x: { label: 'Time from the peak', unit: time.unit, scale: time.scale, values: time.values, logarithmic: false },
-    left: { label: 'Output power', unit: power.unit, scale: power.scale },
-    right: { label: 'Inversion', unit: '', scale: 1 },
-    lines: [
-      { label: 'Output power', axis: 'left', values: power.values },
-      { label: 'Inversion', axis: 'right', values: course.inversion.map((value) => Number(value.toFixed(5))) },
-    ],
-    marks: [],
-    summary: `Pulse waveform: output power rises to ${peak}, ${width} wide at half maximum, ${energy} in all.${remaining}`,
-  };
 }

@@ -1,6 +1,6 @@
 import type { Connection } from 'vscode-languageserver';
-import { exploration } from '../language/exploration.ts';
-import { exported } from '../language/export.ts';
+import { exploration } from '../language/exploration/exploration.ts';
+import { exported } from '../language/export/exported.ts';
 import { failedReadout, readout } from '../language/readout.ts';
 import { template } from '../language/template.ts';
 import { isExportParams, isReadoutParams } from '../protocol/guard.ts';

@@ -5,9 +5,13 @@ import { raised, show } from '../../extension/language/show.ts';
 import { isReadoutState } from '../../extension/protocol/guard.ts';
 import { bench, transmitter } from './bench.ts';
 
-function readoutOf(text: string) {
-  const { analysis, document } = bench(text);
-  return readout(analysis, { uri: document.uri, version: 1, lineOf: (offset) => document.positionAt(offset).line + 1 });
+const readoutOf = (text: string) => readout(bench(text).subject);
+
+function waveformOf(text: string) {
+  const [chart] = readoutOf(text).charts;
+  if (chart?.kind !== 'lines' || chart.id !== 'waveform') return undefined;
+  const [power, inversion] = chart.lines;
+  return { chart, time: chart.x.values, power: power?.values ?? [], inversion: inversion?.values ?? [] };
 }
 
 describe('a readout', () => {
@@ -21,13 +25,39 @@ describe('a readout', () => {
       'Pulse width (FWHM)',
       'Average power',
     ]);
-    const { waveform } = state;
-    expect(waveform).toMatchObject({ timeUnit: 'ns', powerUnit: 'MW' });
-    const peak = Math.max(...(waveform?.power ?? []));
+    const { chart, time, power, inversion } = waveformOf(transmitter)!;
+    expect([chart.x.unit, chart.left.unit]).toEqual(['ns', 'MW']);
+    const peak = Math.max(...power);
     expect(show(peak * 1e6, 'power')).toBe(state.headline[1]?.value);
-    expect(waveform?.time[waveform.power.indexOf(peak)]).toBeCloseTo(0, 0);
-    expect(waveform?.inversion[0]).toBeLessThanOrEqual(1);
-    expect(waveform?.summary).toContain(state.headline[1]?.value);
+    expect(time[power.indexOf(peak)]).toBeCloseTo(0, 0);
+    expect(inversion[0]).toBeLessThanOrEqual(1);
+    expect(chart.summary).toContain(state.headline[1]?.value);
+  });
+
+  test('gives every figure in SI too, as the prediction has it', () => {
+    const { pulse } = bench(transmitter).subject.analysis.prediction ?? {};
+    expect(
+      readoutOf(transmitter)
+        .headline.slice(0, 3)
+        .map(({ amount }) => amount),
+    ).toEqual([pulse?.energy_J, pulse?.peak_power_W, pulse?.width_fwhm_s]);
+  });
+
+  test('shows fluence against threshold, hot spots counted', () => {
+    const chart = readoutOf(transmitter).charts.find(({ id }) => id === 'surfaces');
+    const [surface] = bench(transmitter).subject.analysis.prediction?.surfaces ?? [];
+    expect(chart?.kind === 'bars' && chart.bars[0]?.value).toBeCloseTo((surface?.peak_fluence_J_per_cm2 ?? 0) * 1.5, 4);
+    expect(chart?.kind === 'bars' && chart.bars[0]?.limit).toBeCloseTo(surface?.threshold_J_per_cm2 ?? 0, 4);
+    expect(chart?.kind === 'bars' && chart.bars[0]?.wanted).toBeCloseTo((surface?.threshold_J_per_cm2 ?? 0) / 2, 4);
+  });
+
+  test('lists what is accepted with its reason, still judged as it is', () => {
+    const text = transmitter
+      .replace('hot_spot_factor: 1.5', 'hot_spot_factor: 6')
+      .replace('beam_radius: 0.9 mm', 'beam_radius: 0.9 mm # accept fluence-over-threshold: sacrificial');
+    const state = readoutOf(text);
+    expect(state.problems[0]).toMatchObject({ severity: 'information', accepted: 'sacrificial' });
+    expect(state.surfaces[0]?.verdict).toBe('bad');
   });
 
   test('judges surfaces as their findings do', () => {
@@ -64,7 +94,7 @@ describe('a readout', () => {
   test('below threshold says that nothing is emitted', () => {
     const state = readoutOf(transmitter.replace('power: 600 W', 'power: 6 W'));
     expect(state.absence).toMatch(/^No pulse is predicted: /);
-    expect(state.waveform).toBeUndefined();
+    expect(state.charts).toEqual([]);
     expect(isReadoutState(state)).toBe(true);
   });
 
@@ -75,11 +105,7 @@ describe('a readout', () => {
   });
 
   test('after a fault of ours shows the fault and no figure', () => {
-    const state = failedReadout('a mirror fell off', {
-      uri: 'file:///a%20b.gainmodule.yaml',
-      version: 2,
-      lineOf: () => 1,
-    });
+    const state = failedReadout({ uri: 'file:///a%20b.gainmodule.yaml', version: 2, failure: 'a mirror fell off' });
     expect(isReadoutState(state)).toBe(true);
     expect(state.title).toBe('a b.gainmodule.yaml');
     expect(state.absence).toContain('a mirror fell off');
@@ -88,13 +114,13 @@ describe('a readout', () => {
 
 describe('display units', () => {
   test.each([
-    [[0, 1.2e6], 'W', 'MW', [0, 1.2]],
-    [[-2e-8, 0, 4e-8], 's', 'ns', [-20, 0, 40]],
-    [[3e-13], 's', 'fs', [300]],
-    [[999.9], 'W', 'W', [999.9]],
-    [[0, 0], 'W', 'W', [0, 0]],
-  ])('%j %s', (values, unit, shown, scaled) => {
-    expect(inDisplayUnit(values, unit)).toEqual({ unit: shown, values: scaled });
+    [[0, 1.2e6], 'W', 'MW', 1e6, [0, 1.2]],
+    [[-2e-8, 0, 4e-8], 's', 'ns', 1e-9, [-20, 0, 40]],
+    [[3e-13], 's', 'fs', 1e-15, [300]],
+    [[999.9], 'W', 'W', 1, [999.9]],
+    [[0, 0], 'W', 'W', 1, [0, 0]],
+  ])('%j %s', (values, unit, shown, scale, scaled) => {
+    expect(inDisplayUnit(values, unit)).toEqual({ unit: shown, scale, values: scaled });
   });
 
   test('a series of very small numbers keeps its digits', () => {

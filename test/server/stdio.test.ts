@@ -130,13 +130,21 @@ describe('the readout', () => {
   test('comes with figures, a waveform in display units and the version it is of', async () => {
     const analysed = new Promise((resolve) => server.connection.onNotification(analysedNotification, resolve));
     await server.open(uri, design, 7);
-    expect(await analysed).toEqual({ uri, version: 7 });
+    expect(await analysed).toEqual({
+      uri,
+      version: 7,
+      headline: expect.stringMatching(/^13\.\d mJ · 9\.\d+ ns/),
+      errors: 0,
+      warnings: 0,
+    });
     const state: unknown = await server.connection.sendRequest(readoutRequest, { uri });
     if (!isReadoutState(state)) throw new Error('not a state');
     expect(state).toMatchObject({ uri, version: 7, title: 'Hail-sounding lidar transmitter' });
     expect(state.headline[0]).toMatchObject({ label: 'Pulse energy', value: expect.stringMatching(/^13\.\d mJ$/) });
-    expect(state.waveform).toMatchObject({ timeUnit: 'ns', powerUnit: 'MW' });
-    expect(Math.max(...(state.waveform?.power ?? []))).toBeCloseTo(1.22, 1);
+    const [waveform] = state.charts;
+    if (waveform?.kind !== 'lines') throw new Error('no waveform');
+    expect([waveform.x.unit, waveform.left.unit]).toEqual(['ns', 'MW']);
+    expect(Math.max(...(waveform.lines[0]?.values ?? []))).toBeCloseTo(1.22, 1);
   });
 
   test('keeps its headline and says why there is no pulse', async () => {
@@ -144,7 +152,7 @@ describe('the readout', () => {
     const state: unknown = await server.connection.sendRequest(readoutRequest, { uri });
     if (!isReadoutState(state)) throw new Error('not a state');
     expect(state.absence).toMatch(/No pulse is predicted/);
-    expect(state.waveform).toBeUndefined();
+    expect(state.charts).toEqual([]);
     expect(state.headline.map(({ value }) => value)).toEqual([undefined, undefined, undefined, undefined]);
   });
 
