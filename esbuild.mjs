@@ -1,6 +1,6 @@
 // Bundles everything that is shipped into dist/: nothing is installed or loaded from node_modules at run time.
 // `--silent` prints nothing on success; a failing bundle ends with exit code 1.
-import { chmodSync, statSync } from 'node:fs';
+import { chmodSync, readdirSync, statSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
@@ -40,6 +40,15 @@ const bundles = [
   },
   { ...node, entryPoints: ['extension/server/main.ts'], outfile: 'dist/server.cjs' },
   { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },
+  // The same for editors in a browser: the client in the web worker that VS Code runs extensions in, the server in one of ours.
+  { ...page, entryPoints: ['extension/server/worker-main.ts'], outfile: 'dist/server-worker.js' },
+  {
+    ...page,
+    format: 'cjs',
+    entryPoints: ['extension/editor/extension-web.ts'],
+    outfile: 'dist/extension-web.js',
+    external: ['vscode'],
+  },
   { ...page, entryPoints: ['webview/readout.ts', 'webview/readout.css'], outdir: 'dist' },
 ];
 
@@ -51,8 +60,8 @@ try {
   process.exit(1);
 }
 if (!silent) {
-  for (const file of ['giantpulse.cjs', 'server.cjs', 'extension.cjs', 'readout.js', 'readout.css']) {
+  for (const file of readdirSync(join(root, 'dist')).sort()) {
     const kilobytes = statSync(join(root, 'dist', file)).size / 1000;
-    console.log(`dist/${file.padEnd(16)} ${kilobytes.toFixed(1).padStart(7)} kB`);
+    console.log(`dist/${file.padEnd(18)} ${kilobytes.toFixed(1).padStart(7)} kB`);
   }
 }

@@ -35,6 +35,11 @@ export async function runCommand(args: readonly string[], world: World): Promise
     .action(async (files: string[]) => {
       code = await check(files, world);
     });
+  program
+    .command('serve')
+    .description('run the language server for an editor')
+    .requiredOption('--stdio', 'speak over standard input and output')
+    .action(() => world.serve());
   try {
     await program.parseAsync(args, { from: 'user' });
     return code;

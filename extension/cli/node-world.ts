@@ -1,4 +1,5 @@
 import { closeSync, openSync, readSync, statSync, writeSync } from 'node:fs';
+import { createRequire } from 'node:module';
 import manifest from '../../package.json' with { type: 'json' };
 import type { World } from './world.ts';
 
@@ -37,6 +38,11 @@ export function nodeWorld(): World {
       const { glob } = await import('tinyglobby');
       const found = await glob(patterns, { ignore: ['**/node_modules/**'], dot: false, expandDirectories: false });
       return found.sort();
+    },
+    serve() {
+      // The same bundle that VS Code starts: it listens as soon as it is loaded, and ends the process with its client.
+      createRequire(import.meta.url)('./server.cjs');
+      return new Promise<never>(() => undefined);
     },
     out: (text) => write(1, text),
     err: (text) => write(2, text),

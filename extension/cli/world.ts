@@ -6,6 +6,8 @@ export interface World {
   read(path: string): string;
   /** Design files below folders or matching patterns, sorted. */
   find(patterns: readonly string[]): Promise<string[]>;
+  /** Runs the language server on the standard streams; ends with the process. */
+  serve(): Promise<never>;
   readonly version: string;
   out(text: string): void;
   err(text: string): void;

@@ -1,13 +1,12 @@
-import { commands, type ExtensionContext } from 'vscode';
-import { startClient } from './client.ts';
-import { registerReadout } from './readout-panel.ts';
+import type { ExtensionContext } from 'vscode';
+import { LanguageClient, TransportKind } from 'vscode-languageclient/node';
+import { activateWith } from './activate.ts';
+import { clientOptions } from './client-options.ts';
 
-/** Starts the language server and offers the readout; both end with the extension. */
+/** Where there are processes: the language server is one of its own. */
 export async function activate(context: ExtensionContext): Promise<void> {
-  const client = await startClient(context);
-  context.subscriptions.push(
-    client,
-    registerReadout(context, client),
-    commands.registerCommand('giantpulse.restartServer', () => client.restart()),
-  );
+  const server = { module: context.asAbsolutePath('dist/server.cjs'), transport: TransportKind.ipc };
+  const client = new LanguageClient('giantpulse', 'Giant Pulse', server, await clientOptions(context));
+  activateWith(context, client);
+  await client.start();
 }

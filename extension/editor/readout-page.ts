@@ -1,9 +1,8 @@
-import { randomBytes } from 'node:crypto';
 import { Uri, type Webview } from 'vscode';
 
 /** The page around the readout's bundle: nothing but our own script and style may load, nothing may leave. */
 export function readoutPage(webview: Webview, dist: Uri): string {
-  const nonce = randomBytes(18).toString('base64');
+  const nonce = newNonce();
   const script = webview.asWebviewUri(Uri.joinPath(dist, 'readout.js')).toString();
   const style = webview.asWebviewUri(Uri.joinPath(dist, 'readout.css')).toString();
   const policy = [
@@ -29,4 +28,10 @@ export function readoutPage(webview: Webview, dist: Uri): string {
 <script nonce="${nonce}" src="${script}"></script>
 </body>
 </html>`;
+}
+
+/** Of the web's own cryptography, which desktop and browser hosts have alike. */
+function newNonce(): string {
+  const bytes = crypto.getRandomValues(new Uint8Array(18));
+  return btoa(String.fromCharCode(...bytes));
 }

@@ -8,40 +8,77 @@ import {
   type WebviewPanel,
   window,
 } from 'vscode';
-import type { LanguageClient } from 'vscode-languageclient/node';
-import { isAnalysed, isPageMemory } from '../protocol/guard.ts';
-import { analysedNotification } from '../protocol/requests.ts';
+import { isPageMemory } from '../protocol/guard.ts';
+import { isDesign } from './language-id.ts';
+import type { Pins } from './pins.ts';
 import { createReadout, type Readout } from './readout.ts';
+import type { ServerQuestions } from './server-questions.ts';
 
 const viewType = 'giantpulse.readout';
-const languageId = 'gainmodule';
+/** Known to menus and keys while the design that is edited has a pinned state. */
+const pinnedContext = 'giantpulse.pinned';
+
+export interface ReadoutPanel extends Disposable {
+  analysed(uri: string): void;
+}
 
 /** One readout for the window, beside the text; it follows the design that is being edited. */
-export function registerReadout(context: ExtensionContext, client: LanguageClient): Disposable {
+export function registerReadout(context: ExtensionContext, server: ServerQuestions, pins: Pins): ReadoutPanel {
   let readout: Readout | undefined;
 
+  const tellPinned = (): void => {
+    const uri = readout?.shown ?? designInFront();
+    void commands.executeCommand(
+      'setContext',
+      pinnedContext,
+      uri !== undefined && pins.of(server.uriOf(uri)) !== undefined,
+    );
+  };
+  const setPin = async (uri: Uri, pin: boolean): Promise<void> => {
+    const key = server.uriOf(uri);
+    if (!pin) await pins.drop(key);
+    else {
+      const present = readout?.shown.toString() === uri.toString() ? readout.present() : undefined;
+      const state = present?.state ?? (await server.readout(uri));
+      if (state !== undefined)
+        await pins.keep(key, { state, ...(present?.exploration && { exploration: present.exploration }) });
+    }
+    readout?.pinsChanged();
+    tellPinned();
+  };
   const adopt = (panel: WebviewPanel, uri: Uri): void => {
-    readout = createReadout(panel, Uri.joinPath(context.extensionUri, 'dist'), client, uri);
+    const dist = Uri.joinPath(context.extensionUri, 'dist');
+    readout = createReadout(panel, dist, server, pins, uri, (shown, pin) => void setPin(shown, pin));
     panel.onDidDispose(() => {
       readout = undefined;
     });
+    tellPinned();
   };
   const follow = (editor: TextEditor | undefined): void => {
-    if (editor?.document.languageId === languageId) readout?.show(editor.document.uri);
+    if (editor === undefined || !isDesign(editor.document)) return;
+    readout?.show(editor.document.uri);
+    tellPinned();
+  };
+  const show = (): void => {
+    const uri = designInFront();
+    if (uri === undefined) return;
+    if (readout !== undefined) {
+      readout.show(uri);
+      readout.reveal();
+      return;
+    }
+    const place = { viewColumn: ViewColumn.Beside, preserveFocus: true };
+    adopt(window.createWebviewPanel(viewType, 'Pulse Readout', place), uri);
+  };
+  const pinShown = (pin: boolean) => async (): Promise<void> => {
+    const uri = readout?.shown ?? designInFront();
+    if (uri !== undefined) await setPin(uri, pin);
   };
 
-  return Disposable.from(
-    commands.registerCommand('giantpulse.showReadout', () => {
-      const document = window.activeTextEditor?.document;
-      if (document?.languageId !== languageId) return;
-      if (readout !== undefined) {
-        readout.show(document.uri);
-        readout.reveal();
-        return;
-      }
-      const place = { viewColumn: ViewColumn.Beside, preserveFocus: true };
-      adopt(window.createWebviewPanel(viewType, 'Pulse Readout', place), document.uri);
-    }),
+  const registered = Disposable.from(
+    commands.registerCommand('giantpulse.showReadout', show),
+    commands.registerCommand('giantpulse.pin', pinShown(true)),
+    commands.registerCommand('giantpulse.unpin', pinShown(false)),
     window.registerWebviewPanelSerializer(viewType, {
       async deserializeWebviewPanel(panel, memory: unknown) {
         if (isPageMemory(memory)) adopt(panel, Uri.parse(memory.uri));
@@ -49,8 +86,14 @@ export function registerReadout(context: ExtensionContext, client: LanguageClien
       },
     }),
     window.onDidChangeActiveTextEditor(follow),
-    client.onNotification(analysedNotification, (params: unknown) => {
-      if (isAnalysed(params)) readout?.analysed(params.uri);
+    window.onDidChangeTextEditorSelection(({ textEditor, selections: [first] }) => {
+      if (first !== undefined) readout?.cursor(textEditor.document.uri, first.active.line + 1);
     }),
   );
+  return { analysed: (uri) => readout?.analysed(uri), dispose: () => registered.dispose() };
+}
+
+function designInFront(): Uri | undefined {
+  const document = window.activeTextEditor?.document;
+  return document !== undefined && isDesign(document) ? document.uri : undefined;
 }

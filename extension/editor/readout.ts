@@ -1,57 +1,94 @@
-import {
-  env,
-  Selection,
-  TextEditorRevealType,
-  type Uri,
-  ViewColumn,
-  type WebviewPanel,
-  window,
-  workspace,
-} from 'vscode';
-import type { LanguageClient } from 'vscode-languageclient/node';
-import { isPageMessage, isReadoutState } from '../protocol/guard.ts';
+import { CancellationTokenSource, env, type Uri, type WebviewPanel, workspace } from 'vscode';
+import { isPageMessage } from '../protocol/guard.ts';
 import { type HostMessage, type PageMessage, unreachable } from '../protocol/messages.ts';
-import { type ReadoutParams, readoutRequest } from '../protocol/requests.ts';
+import type { ExplorationState, ReadoutState } from '../protocol/readout.ts';
+import { pngBytes, saveExport } from './exports.ts';
+import type { Pins } from './pins.ts';
 import { readoutPage } from './readout-page.ts';
+import { revealLine } from './reveal-line.ts';
+import type { ServerQuestions } from './server-questions.ts';
 
 export interface Readout {
+  readonly shown: Uri;
   /** Shows this design from now on. */
   show(uri: Uri): void;
   /** Brings the panel to the front, the text keeping the focus. */
   reveal(): void;
   /** The server has a new analysis of this document. */
   analysed(uri: string): void;
+  /** The cursor stands on this line (from 1) of a document. */
+  cursor(uri: Uri, line: number): void;
+  /** What is pinned has changed. */
+  pinsChanged(): void;
+  /** The state and curves that the page has now, to be pinned. */
+  present(): { readonly state: ReadoutState; readonly exploration?: ExplorationState } | undefined;
 }
 
 /** Drives one panel: asks the server for the state of the design shown and hands it to the page. */
-export function createReadout(panel: WebviewPanel, dist: Uri, client: LanguageClient, first: Uri): Readout {
+export function createReadout(
+  panel: WebviewPanel,
+  dist: Uri,
+  server: ServerQuestions,
+  pins: Pins,
+  first: Uri,
+  setPin: (uri: Uri, pin: boolean) => void,
+): Readout {
   let shown = first;
+  let state: ReadoutState | undefined;
+  let curves: ExplorationState | undefined;
+  let exploring = new CancellationTokenSource();
 
-  const stateOf = async (uri: Uri): Promise<HostMessage> => {
-    try {
-      // A readout restored with the window may be there before its design: opening tells the server about it.
-      await workspace.openTextDocument(uri);
-      const params: ReadoutParams = { uri: client.code2ProtocolConverter.asUri(uri) };
-      const state: unknown = await client.sendRequest(readoutRequest, params);
-      if (isReadoutState(state)) return { type: 'state', state };
-      return { type: 'unavailable', reason: `${workspace.asRelativePath(uri)} is not open as a gain-module design.` };
-    } catch (error) {
-      const reason = error instanceof Error ? error.message : String(error);
-      return { type: 'unavailable', reason: `${workspace.asRelativePath(uri)} can't be shown: ${reason}` };
-    }
+  const post = (message: HostMessage): Thenable<boolean> => panel.webview.postMessage(message);
+  const postState = async (): Promise<void> => {
+    if (state === undefined) return;
+    const pinned = pins.of(server.uriOf(shown));
+    await post({ type: 'state', state, ...(pinned && { pinned }) });
   };
   const refresh = async (): Promise<void> => {
     const asked = shown;
-    const message = await stateOf(asked);
-    // Another design may have come to the front while the server answered.
-    if (asked === shown) await panel.webview.postMessage(message);
+    exploring.cancel();
+    exploring = new CancellationTokenSource();
+    const { token } = exploring;
+    // Another design, or a newer text, may have come to the front while the server answered.
+    const isPassed = (): boolean => asked !== shown || token.isCancellationRequested;
+    try {
+      const answer = await server.readout(asked);
+      if (isPassed()) return;
+      state = answer;
+      curves = undefined;
+      if (state === undefined) {
+        await post(unavailable(asked, 'is not open as a gain-module design.'));
+        return;
+      }
+      await postState();
+      const found = await server.exploration(asked, token);
+      if (found === undefined || isPassed() || found.version !== answer?.version) return;
+      curves = found;
+      await post({ type: 'exploration', exploration: found });
+    } catch (error) {
+      if (!isPassed()) await post(unavailable(asked, `can't be shown: ${messageOf(error)}`));
+    }
   };
   const perform = async (message: PageMessage): Promise<void> => {
     switch (message.type) {
       case 'ready':
         return refresh();
-      case 'copy':
-        return env.clipboard.writeText(message.text);
+      case 'pin':
+        return setPin(shown, message.pin);
+      case 'copy': {
+        const text = await server.exportText(shown, { what: 'figures', format: 'text' });
+        return text === undefined ? undefined : env.clipboard.writeText(text);
+      }
+      case 'export': {
+        const { chart, format } = message;
+        const text = await server.exportText(shown, { what: chart, format });
+        if (text !== undefined)
+          await saveExport(shown, { chart, extension: format, bytes: new TextEncoder().encode(text) });
+        return;
+      }
+      case 'picture':
+        await saveExport(shown, { chart: message.chart, extension: 'png', bytes: pngBytes(message.data) });
+        return;
       case 'reveal':
         return revealLine(shown, message.line);
       default:
@@ -61,11 +98,16 @@ export function createReadout(panel: WebviewPanel, dist: Uri, client: LanguageCl
 
   panel.webview.options = { enableScripts: true, localResourceRoots: [dist] };
   panel.webview.onDidReceiveMessage((message: unknown) => {
-    if (isPageMessage(message)) void perform(message);
+    if (!isPageMessage(message)) return;
+    perform(message).catch((error: unknown) => post(unavailable(shown, messageOf(error))));
   });
+  panel.onDidDispose(() => exploring.cancel());
   panel.webview.html = readoutPage(panel.webview, dist);
 
   return {
+    get shown() {
+      return shown;
+    },
     show(uri) {
       if (uri.toString() === shown.toString()) return;
       shown = uri;
@@ -73,15 +115,20 @@ export function createReadout(panel: WebviewPanel, dist: Uri, client: LanguageCl
     },
     reveal: () => panel.reveal(undefined, true),
     analysed(uri) {
-      if (uri === client.code2ProtocolConverter.asUri(shown)) void refresh();
+      if (uri === server.uriOf(shown)) void refresh();
     },
+    cursor(uri, line) {
+      if (uri.toString() === shown.toString()) void post({ type: 'cursor', line });
+    },
+    pinsChanged: () => void postState(),
+    present: () => state && { state, ...(curves && { exploration: curves }) },
   };
 }
 
-async function revealLine(uri: Uri, line: number): Promise<void> {
-  const beside = window.visibleTextEditors.find(({ document }) => document.uri.toString() === uri.toString());
-  const editor = await window.showTextDocument(uri, { viewColumn: beside?.viewColumn ?? ViewColumn.One });
-  const start = editor.document.lineAt(Math.min(line, editor.document.lineCount) - 1).range.start;
-  editor.selection = new Selection(start, start);
-  editor.revealRange(editor.selection, TextEditorRevealType.InCenterIfOutsideViewport);
+function unavailable(uri: Uri, reason: string): HostMessage {
+  return { type: 'unavailable', reason: `${workspace.asRelativePath(uri)} ${reason}` };
+}
+
+function messageOf(error: unknown): string {
+  return error instanceof Error ? error.message : String(error);
 }

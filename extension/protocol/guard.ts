@@ -3,6 +3,8 @@ import type { HostMessage, PageMemory, PageMessage } from './messages.ts';
 import type { ExplorationState, Pinned, ReadoutState } from './readout.ts';
 import {
   type AnalysedParams,
+  type CheckParams,
+  type CheckResult,
   defaultSettings,
   type ExportParams,
   type ExportResult,
@@ -175,6 +177,14 @@ export function isExportParams(value: unknown): value is ExportParams {
   if (!isRecord(value) || !text(value['uri'])) return false;
   const { what, format } = value;
   return what === 'figures' ? oneOf('text', 'csv')(format) : chartId(what) && oneOf('csv', 'svg')(format);
+}
+
+export function isCheckParams(value: unknown): value is CheckParams {
+  return shaped({ file: text, text })(value);
+}
+
+export function isCheckResult(value: unknown): value is CheckResult {
+  return shaped({ lines: listOf(text), errors: whole, warnings: whole, notes: whole, accepted: whole })(value);
 }
 
 export function isExportResult(value: unknown): value is NonNullable<ExportResult> {

@@ -31,6 +31,24 @@ export const templateRequest = 'giantpulse/template';
 
 export type TemplateResult = string;
 
+/** Client to server: what is wrong with a text, as the command's `check` prints it. */
+export const checkRequest = 'giantpulse/check';
+
+export interface CheckParams {
+  /** As the lines shall name it. */
+  readonly file: string;
+  readonly text: string;
+}
+
+export interface CheckResult {
+  /** `file:line:column: severity: message [code]`. */
+  readonly lines: readonly string[];
+  readonly errors: number;
+  readonly warnings: number;
+  readonly notes: number;
+  readonly accepted: number;
+}
+
 /** Server to client: the problems of this version are published, figures can be asked for. */
 export const analysedNotification = 'giantpulse/analysed';
 

@@ -1,10 +1,14 @@
 import type { Connection } from 'vscode-languageserver';
+import type { Analysis } from '../core/analyse.ts';
+import { countsOf, findingLines } from '../core/report/findings-text.ts';
 import { exploration } from '../language/exploration/exploration.ts';
 import { exported } from '../language/export/exported.ts';
 import { failedReadout, readout } from '../language/readout.ts';
 import { template } from '../language/template.ts';
-import { isExportParams, isReadoutParams } from '../protocol/guard.ts';
+import { isCheckParams, isExportParams, isReadoutParams } from '../protocol/guard.ts';
 import {
+  type CheckResult,
+  checkRequest,
   type ExplorationResult,
   type ExportResult,
   explorationRequest,
@@ -16,8 +20,8 @@ import {
 } from '../protocol/requests.ts';
 import { type Answers, pause } from './answers.ts';
 
-/** Answers our own requests: what the readout shows, its curves, exports, and the text of a new design. */
-export function answerReadout(connection: Connection, { own }: Answers): void {
+/** Answers our own requests: what the readout shows, its curves, exports, the check of a text, and that of a new design. */
+export function answerReadout(connection: Connection, { own }: Answers, analyse: (text: string) => Analysis): void {
   const open = (params: unknown): string | undefined => (isReadoutParams(params) ? params.uri : undefined);
 
   connection.onRequest(
@@ -39,6 +43,11 @@ export function answerReadout(connection: Connection, { own }: Answers): void {
       return text === undefined ? null : { version: analysed.version, text };
     }),
   );
+  connection.onRequest(checkRequest, (params: unknown): CheckResult | null => {
+    if (!isCheckParams(params)) return null;
+    const { problems } = analyse(params.text);
+    return { lines: findingLines(params.file, params.text, problems), ...countsOf(problems) };
+  });
   connection.onRequest(templateRequest, (): TemplateResult => template());
 }
 

@@ -102,7 +102,7 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
   });
 
   answerEditor(connection, answers, () => ({ ...options, settings }));
-  answerReadout(connection, answers);
+  answerReadout(connection, answers, analyse);
   documents.listen(connection);
   connection.listen();
 }

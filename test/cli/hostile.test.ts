@@ -78,6 +78,7 @@ describe('a world that fails', () => {
       kindOf: () => 'file',
       read: (path) => (path === 'locked.yaml' ? locked() : design('checks/no-pulse.gainmodule.yaml')),
       find: async () => [],
+      serve: () => Promise.reject(new Error('no server here')),
       version: '0',
       out: (text) => {
         said.out += text;

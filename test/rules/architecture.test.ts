@@ -41,7 +41,7 @@ const PACKAGES: Readonly<Record<string, RegExp>> = {
   'extension/server': /^(vscode-languageserver(-types|-protocol|-textdocument)?(\/.*)?|node:.*)$/,
   'extension/protocol': /^$/,
   'extension/cli': /^(commander|tinyglobby|node:.*)$/,
-  'extension/editor': /^(vscode|vscode-languageclient(\/.*)?|node:.*)$/,
+  'extension/editor': /^(vscode|vscode-languageclient(\/.*)?)$/,
   webview: /^(chart\.js|@vscode\/webview-ui-toolkit)$/,
 };
 

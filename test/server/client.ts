@@ -15,6 +15,7 @@ import {
   StreamMessageWriter,
 } from 'vscode-languageserver-protocol/node';
 
+const commandBundle = fileURLToPath(new URL('../../dist/giantpulse.cjs', import.meta.url));
 const bundle = fileURLToPath(new URL('../../dist/server.cjs', import.meta.url));
 
 /** A client of the shipped server, over its standard streams, as any editor would be. */
@@ -31,8 +32,10 @@ export interface ServerUnderTest {
   problemsOf(uri: string, version: number): Promise<PublishDiagnosticsParams>;
 }
 
-export async function startServer(initializationOptions: unknown = {}): Promise<ServerUnderTest> {
-  const process = spawn(globalThis.process.execPath, [bundle, '--stdio']);
+/** `command`: as any editor starts it; otherwise the bundle that VS Code starts. */
+export async function startServer(initializationOptions: unknown = {}, command = false): Promise<ServerUnderTest> {
+  const args = command ? [commandBundle, 'serve', '--stdio'] : [bundle, '--stdio'];
+  const process = spawn(globalThis.process.execPath, args);
   const connection = createProtocolConnection(
     new StreamMessageReader(process.stdout),
     new StreamMessageWriter(process.stdin),

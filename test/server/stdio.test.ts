@@ -21,7 +21,7 @@ function placeOf(text: string): {
 
 let server: ServerUnderTest;
 beforeEach(async () => {
-  server = await startServer({ checksUri: 'file:///docs/checks.md' });
+  server = await startServer({ checksUri: 'file:///docs/checks.md' }, true);
 });
 afterEach(() => {
   server.connection.dispose();

@@ -15,12 +15,28 @@ export function toldMessage({ message, accepted }: Problem): string {
   return accepted === undefined ? message : `${message} Accepted: ${accepted.reason}`;
 }
 
-/** How many of each severity, and how many accepted: `2 errors, 1 warning, 1 accepted`. */
+export interface Counts {
+  readonly errors: number;
+  readonly warnings: number;
+  readonly notes: number;
+  readonly accepted: number;
+}
+
+/** How many of each severity; what is accepted counts as nothing else. */
+export function countsOf(problems: readonly Problem[]): Counts {
+  const open = problems.filter(({ accepted }) => accepted === undefined);
+  const count = (severity: Problem['severity']) => open.filter((problem) => problem.severity === severity).length;
+  return {
+    errors: count('error'),
+    warnings: count('warning'),
+    notes: count('information'),
+    accepted: problems.length - open.length,
+  };
+}
+
+/** `2 errors, 1 warning, 1 accepted`. */
 export function countText(problems: readonly Problem[]): string {
-  const accepted = problems.filter((p) => p.accepted !== undefined).length;
-  const open = problems.filter((p) => p.accepted === undefined);
-  const count = (severity: Problem['severity']) => open.filter((p) => p.severity === severity).length;
+  const { errors, warnings, notes, accepted } = countsOf(problems);
   const plural = (n: number, word: string) => `${n} ${word}${n === 1 ? '' : 's'}`;
-  const notes = count('information');
-  return `${plural(count('error'), 'error')}, ${plural(count('warning'), 'warning')}${notes ? `, ${plural(notes, 'note')}` : ''}${accepted ? `, ${accepted} accepted` : ''}`;
+  return `${plural(errors, 'error')}, ${plural(warnings, 'warning')}${notes ? `, ${plural(notes, 'note')}` : ''}${accepted ? `, ${accepted} accepted` : ''}`;
 }
