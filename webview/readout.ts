@@ -1,6 +1,6 @@
+import type { ChartId } from '../extension/protocol/chart.ts';
 import { isHostMessage } from '../extension/protocol/guard.ts';
 import { unreachable } from '../extension/protocol/messages.ts';
-import { copyText } from './copy-text.ts';
 import { connectHost } from './host.ts';
 import { registerControls } from './ui/index.ts';
 import { createView } from './view.ts';
@@ -11,15 +11,19 @@ function start(root: HTMLElement): void {
   const host = connectHost();
   const memory = host.recall();
   let uri = memory?.uri ?? '';
-  let tableShown = memory?.tableShown ?? false;
+  const tables = new Set<ChartId>(memory?.tables);
   const remember = (): void => {
-    if (uri !== '') host.remember({ uri, tableShown });
+    if (uri !== '') host.remember({ uri, tables: [...tables] });
   };
-  const view = createView(root, tableShown, {
-    copy: (state) => host.send({ type: 'copy', text: copyText(state) }),
+  const view = createView(root, [...tables], {
+    copy: () => host.send({ type: 'copy' }),
+    pin: (pin) => host.send({ type: 'pin', pin }),
     reveal: (line) => host.send({ type: 'reveal', line }),
-    tableShown(shown) {
-      tableShown = shown;
+    export: (chart, format) => host.send({ type: 'export', chart, format }),
+    picture: (chart, data) => host.send({ type: 'picture', chart, data }),
+    tableShown(id, shown) {
+      if (shown) tables.add(id);
+      else tables.delete(id);
       remember();
     },
   });
@@ -30,7 +34,11 @@ function start(root: HTMLElement): void {
       case 'state':
         uri = data.state.uri;
         remember();
-        return view.show(data.state);
+        return view.show(data.state, data.pinned);
+      case 'exploration':
+        return view.explored(data.exploration);
+      case 'cursor':
+        return view.cursor(data.line);
       case 'unavailable':
         return view.unavailable(data.reason);
       default:

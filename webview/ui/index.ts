@@ -3,6 +3,8 @@ export { button, checkbox, registerControls } from './toolkit.ts';
 
 export interface ButtonOptions {
   readonly label: string;
+  /** What it does in full, where the label alone is too short. */
+  readonly title?: string;
   readonly onPress: () => void;
 }
 

@@ -9,10 +9,14 @@ export function registerControls(): void {
   provideVSCodeDesignSystem().withPrefix(prefix).register(vsCodeButton(), vsCodeCheckbox());
 }
 
-export function button({ label, onPress }: ButtonOptions): HTMLElement {
+export function button({ label, title, onPress }: ButtonOptions): HTMLElement {
   const made = document.createElement(`${prefix}-button`);
   made.setAttribute('appearance', 'secondary');
   made.textContent = label;
+  if (title !== undefined) {
+    made.setAttribute('title', title);
+    made.setAttribute('aria-label', title);
+  }
   made.addEventListener('click', onPress);
   return made;
 }

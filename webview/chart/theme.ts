@@ -1,10 +1,13 @@
 export interface ChartTheme {
   readonly text: string;
   readonly grid: string;
-  readonly power: string;
-  readonly inversion: string;
+  readonly ground: string;
+  /** Of the lines on the left axis and on the right one. */
+  readonly left: string;
+  readonly right: string;
   readonly surface: string;
   readonly border: string;
+  readonly bad: string;
   readonly font: string;
   /** Thicker where the theme asks for high contrast. */
   readonly lineWidth: number;
@@ -25,10 +28,12 @@ export function chartTheme(): ChartTheme {
     text,
     // Faint on any ground: the theme's own borders shout over the curves in high contrast and vanish in light themes.
     grid: 'rgba(128, 128, 128, 0.3)',
-    power: highContrast ? text : colour(['--vscode-charts-blue'], text),
-    inversion: colour(['--vscode-charts-yellow'], text),
+    ground: colour(['--vscode-editor-background'], 'Canvas'),
+    left: highContrast ? text : colour(['--vscode-charts-blue'], text),
+    right: colour(['--vscode-charts-purple'], text),
     surface: colour(['--vscode-editorHoverWidget-background', '--vscode-editor-background'], 'Canvas'),
     border: colour(['--vscode-contrastBorder', '--vscode-editorHoverWidget-border'], text),
+    bad: colour(['--vscode-editorError-foreground', '--vscode-errorForeground'], text),
     font: colour(['--vscode-font-family'], 'sans-serif'),
     lineWidth: highContrast ? 2.5 : 1.75,
   };
