@@ -41,7 +41,7 @@ await build({
   external: ['vscode'],
   logLevel: 'warning',
 });
-const parts = ['extension-host.mjs', 'end-to-end.mjs', 'pre-commit.mjs'];
+const parts = ['page.mjs', 'extension-host.mjs', 'end-to-end.mjs', 'pre-commit.mjs'];
 if (process.env.GIANTPULSE_DESKTOP_CODE !== undefined) parts.push('desktop.mjs');
 let passed = 0;
 let failed = 0;
