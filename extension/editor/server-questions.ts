@@ -30,13 +30,13 @@ type WithoutUri<Params> = Params extends { readonly uri: string } ? Omit<Params,
 
 export function createServerQuestions(client: BaseLanguageClient): ServerQuestions {
   const uriOf = (uri: Uri): string => client.code2ProtocolConverter.asUri(uri);
-  // The answer to a version that has passed is an error by protocol; the next version brings its own answer.
-  const ask = async (method: string, params: unknown, token?: CancellationToken): Promise<unknown> => {
+  // The answer to a version that has passed is an error by protocol; the version that is there now is asked again.
+  const ask = async (method: string, params: unknown): Promise<unknown> => {
     for (let attempt = 0; ; attempt++) {
       try {
-        return await client.sendRequest<unknown>(method, params, token);
+        return await client.sendRequest<unknown>(method, params);
       } catch (error) {
-        if (token?.isCancellationRequested || !isPassed(error)) throw error;
+        if (!isPassed(error)) throw error;
         if (attempt >= 5) return undefined;
       }
     }

@@ -1,7 +1,8 @@
-// Runs the suite's `run()` inside the extension host of a real VS Code workbench.
+// Runs the suite's `run()` inside an extension host of a real VS Code workbench: `node extension-host.mjs [web|vsix]`.
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { startBrowser } from './browser.mjs';
+import { packageExtension } from './package.mjs';
 import { startWorkbench } from './workbench.mjs';
 
 const tests = join(dirname(fileURLToPath(import.meta.url)), 'dist/suite.cjs');
@@ -10,7 +11,8 @@ const mark = '[suite] ';
 const noise = [];
 let summary;
 
-const workbench = await startWorkbench();
+const [mode = 'development'] = process.argv.slice(2);
+const workbench = await startWorkbench(mode === 'vsix' ? { vsix: packageExtension() } : {});
 const browser = await startBrowser();
 try {
   const page = await browser.newPage({ viewport: { width: 1280, height: 800 } });
@@ -25,7 +27,7 @@ try {
     });
     void page.exposeFunction('codeAutomationExit', done);
   });
-  await page.goto(workbench.url({ tests }));
+  await page.goto(workbench.url({ tests, ...(mode === 'web' && { kind: 'web' }) }));
   await ended;
 } catch (error) {
   console.error(error);

@@ -9,9 +9,10 @@ import { setUp } from './setup.mjs';
 const here = dirname(fileURLToPath(import.meta.url));
 
 function run(part) {
+  const [script, ...args] = part.split(' ');
   return new Promise((done) => {
     console.log(`\n${part}`);
-    const child = spawn(process.execPath, [join(here, part)], { stdio: ['ignore', 'pipe', 'inherit'] });
+    const child = spawn(process.execPath, [join(here, script), ...args], { stdio: ['ignore', 'pipe', 'inherit'] });
     let output = '';
     child.stdout.on('data', (chunk) => {
       output += chunk;
@@ -31,17 +32,28 @@ const browser = process.env.CHROMIUM ?? '/usr/bin/chromium';
 if (!existsSync(browser))
   throw new Error(`no browser at ${browser}: install Debian's chromium, or name one in CHROMIUM`);
 setUp();
+// One bundle for both kinds of host: no module of Node's own, which the web worker has not.
 await build({
   entryPoints: [join(here, 'suite/index.ts')],
   outfile: join(here, 'dist/suite.cjs'),
   bundle: true,
-  platform: 'node',
+  platform: 'browser',
   format: 'cjs',
-  target: 'node20',
+  target: 'es2022',
   external: ['vscode'],
   logLevel: 'warning',
 });
-const parts = ['page.mjs', 'extension-host.mjs', 'end-to-end.mjs', 'pre-commit.mjs'];
+const all = [
+  'page.mjs',
+  'extension-host.mjs',
+  'extension-host.mjs web',
+  'extension-host.mjs vsix',
+  'end-to-end.mjs',
+  'pre-commit.mjs',
+];
+// `npm run test:system -- page` runs the parts whose names hold a word.
+const [word] = process.argv.slice(2);
+const parts = all.filter((part) => word === undefined || part.includes(word));
 if (process.env.GIANTPULSE_DESKTOP_CODE !== undefined) parts.push('desktop.mjs');
 let passed = 0;
 let failed = 0;

@@ -1,5 +1,5 @@
 // Starts a real VS Code workbench (the VS Code server that code-server's package carries) on 127.0.0.1.
-import { spawn } from 'node:child_process';
+import { spawn, spawnSync } from 'node:child_process';
 import {
   cpSync,
   createWriteStream,
@@ -54,8 +54,8 @@ function cleanEnvironment() {
   return Object.fromEntries([...kept, ['EXTENSIONS_GALLERY', '{}']]);
 }
 
-/** Starts the server with a fresh profile and a copy of the test workspace. */
-export async function startWorkbench() {
+/** Starts the server with a fresh profile and a copy of the test workspace; with `vsix` installed, where one is given. */
+export async function startWorkbench({ vsix } = {}) {
   const root = mkdtempSync(join(tmpdir(), 'giantpulse-host-'));
   const folder = join(root, 'workspace');
   const data = join(root, 'data');
@@ -66,6 +66,14 @@ export async function startWorkbench() {
   mkdirSync(builtins);
   for (const name of wantedBuiltins()) symlinkSync(join(vscode, 'extensions', name), join(builtins, name));
 
+  const empty = join(root, 'empty-extension');
+  if (vsix !== undefined) {
+    install(vsix, root, data, builtins);
+    // The test runner wants an extension under development: this one does nothing.
+    mkdirSync(empty);
+    const manifest = { name: 'empty', publisher: 'host-tests', version: '0.0.1', engines: { vscode: '^1.91.0' } };
+    writeFileSync(join(empty, 'package.json'), JSON.stringify(manifest));
+  }
   const log = createWriteStream(join(root, 'server.log'));
   const child = spawn(node, [join(vscode, 'out/server-main.js'), ...options(root, data, builtins)], {
     env: cleanEnvironment(),
@@ -79,7 +87,8 @@ export async function startWorkbench() {
   const port = await listeningPort(child, log, ended);
   return {
     folder,
-    url: (payload) => address(`127.0.0.1:${port}`, folder, payload),
+    url: (payload) =>
+      address(`127.0.0.1:${port}`, folder, { extension: vsix === undefined ? project : empty, ...payload }),
     async stop() {
       signal(child, 'SIGTERM');
       const impatient = setTimeout(kill, 5000);
@@ -92,13 +101,23 @@ export async function startWorkbench() {
   };
 }
 
-function options(root, data, builtins) {
-  const places = ['--server-data-dir', join(root, 'server'), '--user-data-dir', data];
+function install(vsix, root, data, builtins) {
+  const args = [join(vscode, 'out/server-main.js'), ...places(root, data, builtins), '--install-extension', vsix];
+  const { status, stdout, stderr } = spawnSync(node, args, { env: cleanEnvironment(), encoding: 'utf8' });
+  if (status !== 0) throw new Error(`installing ${vsix} failed:\n${stdout}${stderr}`);
+}
+
+function places(root, data, builtins) {
+  const folders = ['--server-data-dir', join(root, 'server'), '--user-data-dir', data];
   const extensions = ['--extensions-dir', join(root, 'extensions'), '--builtin-extensions-dir', builtins];
+  return ['--accept-server-license-terms', ...folders, ...extensions];
+}
+
+function options(root, data, builtins) {
   const listen = ['--host', '127.0.0.1', '--port', '0', '--without-connection-token'];
   // Without the smoke-test driver the workbench ignores extension paths in its address.
   const quiet = ['--telemetry-level', 'off', '--disable-workspace-trust', '--enable-smoke-test-driver'];
-  return ['--accept-server-license-terms', ...places, ...extensions, ...listen, ...quiet];
+  return [...places(root, data, builtins), ...listen, ...quiet];
 }
 
 function signal(child, name) {
@@ -127,12 +146,13 @@ function listeningPort(child, log, ended) {
   });
 }
 
-/** The workbench's address, with our extension under development; `tests` and `file` are absolute paths. */
-function address(authority, folder, { tests, file } = {}) {
+/** The workbench's address with an extension under development; paths are absolute. `kind` 'web': in the web-worker host. */
+function address(authority, folder, { extension, tests, file, kind } = {}) {
   const remote = (path) => `vscode-remote://${authority}${path}`;
   const payload = [
     ['skipWelcome', 'true'],
-    ['extensionDevelopmentPath', remote(project)],
+    ['extensionDevelopmentPath', remote(extension)],
+    ...(kind === undefined ? [] : [['extensionDevelopmentKind', kind]]),
     ...(tests === undefined ? [] : [['extensionTestsPath', remote(tests)]]),
     ...(file === undefined ? [] : [['openFile', remote(file)]]),
   ];

@@ -1,21 +1,15 @@
 import type { Fix } from '../report/problem.ts';
-import validate from './generated/validate.js';
 import { keySchema, type SchemaNode, type SectionSchema } from './schema.ts';
+import { sectionRules } from './section-rules.ts';
 import type { TreeNode } from './tree.ts';
 
 /** A key with its value as plain data, examples of the schema throughout. */
 type Example = string | number | { readonly [key: string]: Example };
 
 /** Writes a key that a section lacks, with the schema's examples for values: the author replaces them. */
-export function fillingFix(
-  text: string,
-  root: TreeNode,
-  section: TreeNode,
-  key: string,
-  schema: SchemaNode | undefined,
-): Fix[] {
+export function fillingFix(text: string, section: TreeNode, key: string, schema: SchemaNode | undefined): Fix[] {
   const inner = keySchema(schema, key);
-  const example = inner && exampleFor(root, section.path, key, inner);
+  const example = inner && exampleFor(section.path, key, inner);
   const place = example === undefined ? undefined : placeIn(text, section);
   if (example === undefined || place === undefined) return [];
   const { offset, indent } = place;
@@ -79,26 +73,33 @@ function leaf(schema: SchemaNode): string | number | undefined {
 }
 
 /** Required keys first; what a condition then asks for is added until the validator asks for no more of this section. */
-function exampleFor(root: TreeNode, section: string, key: string, schema: SchemaNode): Example | undefined {
+function exampleFor(section: string, key: string, schema: SchemaNode): Example | undefined {
   if (schema.kind === 'list') return undefined;
   if (schema.kind !== 'section') return leaf(schema);
-  const pointer = `/${[...(section === '' ? [] : section.split('.')), key].join('/')}`;
+  const path = section === '' ? key : `${section}.${key}`;
   const keys = [...schema.required];
   for (let round = 0; round < 4; round++) {
     const example = sectionExample(schema, keys);
-    if (section !== '' || !isObject(root.data)) return example;
-    validate({ ...root.data, [key]: example });
-    const asked = (validate.errors ?? []).flatMap(({ keyword, instancePath, params }) =>
-      keyword === 'required' && instancePath === pointer && params.missingProperty ? [params.missingProperty] : [],
-    );
-    const more = asked.filter((name) => !keys.includes(name));
+    const more = sectionRules(path, example).missing.filter((name) => !keys.includes(name));
     if (more.length === 0) return example;
     keys.push(...more);
   }
   return undefined;
 }
 
-function sectionExample(schema: SectionSchema, keys: readonly string[]): Example {
+/** A key with an example for its value, as lines below one another at an indentation, or on one line in flow style. */
+export function exampleText(
+  section: string,
+  key: string,
+  schema: SchemaNode,
+  indent: string | undefined,
+): string | undefined {
+  const example = exampleFor(section, key, schema);
+  if (example === undefined) return undefined;
+  return indent === undefined ? `${key}: ${inFlow(example)}` : lines(key, example, indent).join('\n').trimStart();
+}
+
+function sectionExample(schema: SectionSchema, keys: readonly string[]): { readonly [key: string]: Example } {
   const order = Object.keys(schema.keys).filter((key) => keys.includes(key));
   return Object.fromEntries(
     order.flatMap((key) => {
@@ -107,8 +108,4 @@ function sectionExample(schema: SectionSchema, keys: readonly string[]): Example
       return value === undefined ? [] : [[key, value]];
     }),
   );
-}
-
-function isObject(value: unknown): value is object {
-  return typeof value === 'object' && value !== null && !Array.isArray(value);
 }

@@ -39,13 +39,12 @@ export function checkStructure(
   }
   for (const fault of faults) {
     if (fault.node.kind === 'broken') continue;
-    report({ text, root, partial, misspelt, findings }, fault);
+    report({ text, partial, misspelt, findings }, fault);
   }
 }
 
 interface Reading {
   readonly text: string;
-  readonly root: TreeNode;
   readonly partial: boolean;
   readonly misspelt: ReadonlySet<string>;
   readonly findings: Findings;
@@ -96,7 +95,7 @@ function conditionOf({ error }: Fault): Condition | undefined {
 }
 
 /** On the value that demands the key, if one does, else on the section that lacks it. */
-function reportMissing({ text, root, misspelt, findings }: Reading, fault: Fault): void {
+function reportMissing({ text, misspelt, findings }: Reading, fault: Fault): void {
   const { error, node, schema } = fault;
   const key = error.params.missingProperty ?? '';
   if (misspelt.has(`${node.path} ${key}`)) return;
@@ -105,7 +104,7 @@ function reportMissing({ text, root, misspelt, findings }: Reading, fault: Fault
   const name = placeName(node.path);
   const why = condition === undefined ? `${name} needs \`${key}\`` : `${name}: ${condition.because}`;
   const message = `${why}. Add ${exampleOf(key, keySchema(schema, key))}.`;
-  const fixes = fillingFix(text, root, node, key, schema);
+  const fixes = fillingFix(text, node, key, schema);
   findings.add('missing-key', node.path, blamed?.written ?? node.value, message, { fixes });
 }
 

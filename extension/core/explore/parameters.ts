@@ -1,8 +1,8 @@
 import type { Analysis } from '../analyse.ts';
 import type { ReadDesign } from '../design/read.ts';
 import type { Limit } from '../design/schema.ts';
-import type { TreeNode } from '../design/tree.ts';
-import { parentPath } from '../design/tree.ts';
+import { steps } from '../design/steps.ts';
+import { parentPath, type TreeNode } from '../design/tree.ts';
 
 /** A number of a design that its prediction depends on. */
 export interface Parameter {
@@ -81,9 +81,4 @@ function valueAt(values: unknown, path: string): unknown {
     if (Array.isArray(inner)) return typeof step === 'number' ? inner[step] : undefined;
     return Object.hasOwn(inner, step) ? Reflect.get(inner, step) : undefined;
   }, values);
-}
-
-/** `surfaces[0].beam_radius` as its steps. */
-export function steps(path: string): readonly (string | number)[] {
-  return path.split(/\.|(?=\[)/).map((token) => (token.startsWith('[') ? Number(token.slice(1, -1)) : token));
 }

@@ -1,9 +1,9 @@
 import type { Analysis } from '../analyse.ts';
 import type { ReadDesign } from '../design/read.ts';
 import { resolveDesign } from '../design/resolve.ts';
+import { steps } from '../design/steps.ts';
 import { wantedFigures } from '../design/wanted.ts';
 import { type Outcome, predict } from '../physics/predict.ts';
-import { steps } from './parameters.ts';
 
 /** A quantity of a design (by its path, whether or not the file writes it) at another value, SI. */
 export interface Change {

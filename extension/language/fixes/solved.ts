@@ -1,5 +1,5 @@
+import { steps } from '../../core/design/steps.ts';
 import { type Aim, aimOf, failuresOf, goalOf } from '../../core/explore/goals.ts';
-import { steps } from '../../core/explore/parameters.ts';
 import { slopeOf } from '../../core/explore/sensitivity.ts';
 import { type Solution, solve } from '../../core/explore/solve.ts';
 import type { Outcome } from '../../core/physics/predict.ts';

@@ -1,5 +1,5 @@
-import * as assert from 'node:assert/strict';
 import { commands, languages, Position, TabInputWebview, window } from 'vscode';
+import * as assert from './assert.ts';
 import { type Case, hoverText, ourExtension, placeOf, problemsOf, show, until } from './harness.ts';
 
 const sound = 'transmitter.gainmodule.yaml';

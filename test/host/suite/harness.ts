@@ -1,4 +1,3 @@
-import { appendFileSync } from 'node:fs';
 import {
   type CodeAction,
   commands,
@@ -11,6 +10,7 @@ import {
   Range,
   type TextDocument,
   Uri,
+  WorkspaceEdit,
   window,
   workspace,
 } from 'vscode';
@@ -79,11 +79,26 @@ export function ourExtension() {
   return extension;
 }
 
-/** Lines that the runner recognises as the suite's own; on a desktop they are also read from a file. */
+/** Lines that the runner recognises as the suite's own. */
 export function say(text: string): void {
-  const { GIANTPULSE_SUITE_REPORT: report } = process.env;
   for (const line of text.split('\n')) {
     console.log(`[suite] ${line}`);
-    if (report !== undefined) appendFileSync(report, `${line}\n`);
+    told.push(line);
   }
+}
+
+const told: string[] = [];
+
+/** On a desktop the lines are read from a file, which only the extension host can name. */
+export async function writeReport(): Promise<void> {
+  const report = typeof process === 'undefined' ? undefined : process.env['GIANTPULSE_SUITE_REPORT'];
+  if (report !== undefined)
+    await workspace.fs.writeFile(Uri.file(report), new TextEncoder().encode(`${told.join('\n')}\n`));
+}
+
+/** Edits a document as typing would, in one step. */
+export async function replace(document: TextDocument, from: string, to: string): Promise<void> {
+  const edit = new WorkspaceEdit();
+  edit.replace(document.uri, placeOf(document, from), to);
+  if (!(await workspace.applyEdit(edit))) throw new Error(`the edit of ${from} was refused`);
 }

@@ -1,14 +1,16 @@
 import { env, version } from 'vscode';
 import { editing } from './editing.ts';
-import { say } from './harness.ts';
+import { features } from './features.ts';
+import { say, writeReport } from './harness.ts';
 import { problems } from './problems.ts';
+import { surroundings } from './surroundings.ts';
 
 /** VS Code calls this in its extension host. The closing line is the only proof that the suite ran to its end. */
 export async function run(): Promise<void> {
-  say(`VS Code ${version} on ${env.appHost}, Node ${process.version}`);
+  say(`VS Code ${version} on ${env.appHost}, ${env.uiKind === 1 ? 'desktop' : 'web'} UI`);
   let passed = 0;
   let failed = 0;
-  for (const { name, run: test } of [...editing, ...problems]) {
+  for (const { name, run: test } of [...editing, ...problems, ...features, ...surroundings]) {
     const start = performance.now();
     try {
       await test();
@@ -20,5 +22,6 @@ export async function run(): Promise<void> {
     }
   }
   say(`${passed} passed, ${failed} failed`);
+  await writeReport();
   if (failed > 0) throw new Error(`${failed} failed`);
 }

@@ -1,5 +1,5 @@
-import * as assert from 'node:assert/strict';
 import { DiagnosticSeverity, WorkspaceEdit, window, workspace } from 'vscode';
+import * as assert from './assert.ts';
 import { type Case, codeOf, fixesAt, placeOf, problemsOf, revert, show, until } from './harness.ts';
 
 const forgotten = 'unit_forgotten.gainmodule.yaml';
@@ -40,7 +40,7 @@ export const problems: readonly Case[] = [
       await until('a problem after the edit', () => missingUnit(document));
       await revert(document);
       await until('no error', () => problemsOf(document).every(({ severity }) => severity > 0) || undefined);
-      assert.deepEqual(
+      assert.same(
         problemsOf(document)
           .filter(({ severity }) => severity === DiagnosticSeverity.Error)
           .map(codeOf),
@@ -82,7 +82,7 @@ export const problems: readonly Case[] = [
       const document = await show('other.yaml');
       assert.equal(document.languageId, 'yaml');
       await new Promise((resolve) => setTimeout(resolve, 1000));
-      assert.deepEqual(problemsOf(document), []);
+      assert.same(problemsOf(document), []);
     },
   },
 ];
