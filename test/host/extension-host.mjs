@@ -10,6 +10,7 @@ const tests = join(dirname(fileURLToPath(import.meta.url)), 'dist/suite.cjs');
 const mark = '[suite] ';
 const noise = [];
 let summary;
+let host;
 
 const [mode = 'development'] = process.argv.slice(2);
 const workbench = await startWorkbench(mode === 'vsix' ? { vsix: packageExtension() } : {});
@@ -23,7 +24,10 @@ try {
       const text = parts.map((part) => (typeof part === 'string' ? part : JSON.stringify(part))).join(' ');
       if (!text.startsWith(mark)) noise.push(`${type}: ${text}`);
       else if (/^\d+ passed, \d+ failed$/.test(text.slice(mark.length))) summary = text.slice(mark.length);
-      else console.log(text.slice(mark.length));
+      else {
+        host ??= /extensions in (a .*)$/.exec(text)?.[1];
+        console.log(text.slice(mark.length));
+      }
     });
     void page.exposeFunction('codeAutomationExit', done);
   });
@@ -36,5 +40,7 @@ try {
   await workbench.stop();
 }
 if (!/ 0 failed$/.test(summary ?? '')) console.log(`the workbench's log:\n${noise.slice(-15).join('\n')}`);
+const wanted = mode === 'web' ? 'a web worker' : 'a process of Node';
+if (host !== wanted) summary = undefined;
 // A crashed extension host ends like a happy one: without the suite's closing line nothing is known to have passed.
-console.log(summary ?? 'the extension host ended before the suite did');
+console.log(summary ?? `the suite did not run to its end in ${wanted}, but in ${host}`);

@@ -50,12 +50,16 @@ function inUnit(
   return readsAs(`${text}${sign}${rest}`, quantity, dimension);
 }
 
-/** Only what means the same, and what a person would write: no powers of ten, no long rows of digits. */
+/** Only what means the same, and what a person would write: no powers of ten, no long rows of noughts. */
 function readsAs(text: string, { value, tolerance = 0 }: Quantity, dimension: Parameters<typeof readQuantity>[1]) {
   const read = readQuantity(text, dimension);
-  if ('problem' in read || !/^[+-]?\d{1,5}(?:\.\d+)?(?!\S*e)/.test(text)) return undefined;
+  if ('problem' in read || !isHandy(Math.abs(read.quantity.written))) return undefined;
   const close = (one: number, other: number) => Math.abs(one - other) <= 1e-12 * Math.abs(other);
   return close(read.quantity.value, value) && close(read.quantity.tolerance ?? 0, tolerance) ? text : undefined;
+}
+
+function isHandy(number: number): boolean {
+  return number >= 1e-3 && number < 1e5;
 }
 
 /** Twelve digits undo the rounding of a factor such as 1e-3. */

@@ -7,7 +7,8 @@ import { surroundings } from './surroundings.ts';
 
 /** VS Code calls this in its extension host. The closing line is the only proof that the suite ran to its end. */
 export async function run(): Promise<void> {
-  say(`VS Code ${version} on ${env.appHost}, ${env.uiKind === 1 ? 'desktop' : 'web'} UI`);
+  const worker = 'importScripts' in globalThis;
+  say(`VS Code ${version} on ${env.appHost}, extensions in ${worker ? 'a web worker' : 'a process of Node'}`);
   let passed = 0;
   let failed = 0;
   for (const { name, run: test } of [...editing, ...problems, ...features, ...surroundings]) {
