@@ -49,6 +49,7 @@ const all = [
   'extension-host.mjs web',
   'extension-host.mjs vsix',
   'end-to-end.mjs',
+  'neovim.mjs',
   'pre-commit.mjs',
 ];
 // `npm run test:system -- page` runs the parts whose names hold a word.
