@@ -42,11 +42,12 @@ const bundles = [
   { ...node, entryPoints: ['extension/editor/extension.ts'], outfile: 'dist/extension.cjs', external: ['vscode'] },
   // The same for editors in a browser: the client in the web worker that VS Code runs extensions in, the server in one of ours.
   { ...page, entryPoints: ['extension/server/worker-main.ts'], outfile: 'dist/server-worker.js' },
+  // `.cjs`, since the package is one of ES modules: VS Code would take `.js` for one of them, which its worker can't load.
   {
     ...page,
     format: 'cjs',
     entryPoints: ['extension/editor/extension-web.ts'],
-    outfile: 'dist/extension-web.js',
+    outfile: 'dist/extension-web.cjs',
     external: ['vscode'],
   },
   { ...page, entryPoints: ['webview/readout.ts', 'webview/readout.css'], outdir: 'dist' },

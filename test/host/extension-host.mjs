@@ -13,7 +13,7 @@ let summary;
 let host;
 
 const [mode = 'development'] = process.argv.slice(2);
-const workbench = await startWorkbench(mode === 'vsix' ? { vsix: packageExtension() } : {});
+const workbench = await startWorkbench({ ...(mode === 'vsix' && { vsix: packageExtension() }), web: mode === 'web' });
 const browser = await startBrowser();
 try {
   const page = await browser.newPage({ viewport: { width: 1280, height: 800 } });
@@ -31,7 +31,7 @@ try {
     });
     void page.exposeFunction('codeAutomationExit', done);
   });
-  await page.goto(workbench.url({ tests, ...(mode === 'web' && { kind: 'web' }) }));
+  await page.goto(workbench.url({ tests: mode === 'web' ? join(workbench.extension, 'suite.cjs') : tests }));
   await ended;
 } catch (error) {
   console.error(error);

@@ -1,4 +1,4 @@
-// Packages the extension as dist/giantpulse.vsix, with what its manifest lists and nothing else.
+// Packages the extension as giantpulse.vsix, with what its manifest lists and nothing else.
 import { spawnSync } from 'node:child_process';
 import { readFileSync, statSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
@@ -10,7 +10,7 @@ const project = resolve(here, '../..');
 
 /** The package's path. Dependencies are bundled, so that none is packed. */
 export function packageExtension() {
-  const target = join(project, 'dist/giantpulse.vsix');
+  const target = join(project, 'giantpulse.vsix');
   const args = [
     'package',
     '--no-dependencies',
@@ -37,5 +37,5 @@ if (process.argv[1] === fileURLToPath(import.meta.url)) {
   setUp();
   const file = packageExtension();
   const { version } = JSON.parse(readFileSync(join(project, 'package.json'), 'utf8'));
-  console.log(`dist/giantpulse.vsix, version ${version}: ${(statSync(file).size / 1000).toFixed(0)} kB`);
+  console.log(`giantpulse.vsix, version ${version}: ${(statSync(file).size / 1000).toFixed(0)} kB`);
 }

@@ -54,8 +54,11 @@ function cleanEnvironment() {
   return Object.fromEntries([...kept, ['EXTENSIONS_GALLERY', '{}']]);
 }
 
-/** Starts the server with a fresh profile and a copy of the test workspace; with `vsix` installed, where one is given. */
-export async function startWorkbench({ vsix } = {}) {
+/**
+ * Starts the server with a fresh profile and a copy of the test workspace. `vsix`: installed instead of the project under
+ * development. `web`: the project as a browser alone would have it, so that it runs in the web-worker host.
+ */
+export async function startWorkbench({ vsix, web = false } = {}) {
   const root = mkdtempSync(join(tmpdir(), 'giantpulse-host-'));
   const folder = join(root, 'workspace');
   const data = join(root, 'data');
@@ -74,6 +77,9 @@ export async function startWorkbench({ vsix } = {}) {
     const manifest = { name: 'empty', publisher: 'host-tests', version: '0.0.1', engines: { vscode: '^1.91.0' } };
     writeFileSync(join(empty, 'package.json'), JSON.stringify(manifest));
   }
+  const webExtension = join(root, 'web-extension');
+  if (web) makeWebExtension(webExtension);
+  const extension = vsix !== undefined ? empty : web ? webExtension : project;
   const log = createWriteStream(join(root, 'server.log'));
   const child = spawn(node, [join(vscode, 'out/server-main.js'), ...options(root, data, builtins)], {
     env: cleanEnvironment(),
@@ -87,8 +93,8 @@ export async function startWorkbench({ vsix } = {}) {
   const port = await listeningPort(child, log, ended);
   return {
     folder,
-    url: (payload) =>
-      address(`127.0.0.1:${port}`, folder, { extension: vsix === undefined ? project : empty, ...payload }),
+    extension,
+    url: (payload) => address(`127.0.0.1:${port}`, folder, { extension, ...payload }),
     async stop() {
       signal(child, 'SIGTERM');
       const impatient = setTimeout(kill, 5000);
@@ -99,6 +105,17 @@ export async function startWorkbench({ vsix } = {}) {
       rmSync(root, { recursive: true, force: true });
     },
   };
+}
+
+/** Without `main` there is nothing for a host of Node's: the workbench can only take `browser`, in the web worker. */
+function makeWebExtension(folder) {
+  mkdirSync(folder);
+  const { main: _, ...manifest } = JSON.parse(readFileSync(join(project, 'package.json'), 'utf8'));
+  writeFileSync(join(folder, 'package.json'), JSON.stringify(manifest));
+  for (const name of ['dist', 'extension', 'schemas'])
+    cpSync(join(project, name), join(folder, name), { recursive: true });
+  // The host of the tests is that of the extension whose folder they lie in.
+  cpSync(join(here, 'dist/suite.cjs'), join(folder, 'suite.cjs'));
 }
 
 function install(vsix, root, data, builtins) {
@@ -146,13 +163,12 @@ function listeningPort(child, log, ended) {
   });
 }
 
-/** The workbench's address with an extension under development; paths are absolute. `kind` 'web': in the web-worker host. */
-function address(authority, folder, { extension, tests, file, kind } = {}) {
+/** The workbench's address with an extension under development; paths are absolute. */
+function address(authority, folder, { extension, tests, file } = {}) {
   const remote = (path) => `vscode-remote://${authority}${path}`;
   const payload = [
     ['skipWelcome', 'true'],
     ['extensionDevelopmentPath', remote(extension)],
-    ...(kind === undefined ? [] : [['extensionDevelopmentKind', kind]]),
     ...(tests === undefined ? [] : [['extensionTestsPath', remote(tests)]]),
     ...(file === undefined ? [] : [['openFile', remote(file)]]),
   ];

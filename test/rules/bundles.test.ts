@@ -10,7 +10,7 @@ it.each([
   ['server.cjs', 600_000],
   ['server-worker.js', 600_000],
   ['extension.cjs', 450_000],
-  ['extension-web.js', 450_000],
+  ['extension-web.cjs', 450_000],
   ['giantpulse.cjs', 500_000],
   ['readout.js', 400_000],
 ])('%s stays within its budget', (file, budget) => {

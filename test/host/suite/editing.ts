@@ -15,7 +15,8 @@ export const editing: readonly Case[] = [
     async run() {
       assert.equal((await show('short_name.gainmodule.yml')).languageId, 'gainmodule');
       assert.equal((await show(sound)).languageId, 'gainmodule');
-      await until('activation', () => ourExtension().isActive || undefined);
+      await ourExtension().activate();
+      assert.equal(ourExtension().isActive, true);
     },
   },
   {
