@@ -147,8 +147,10 @@ const cases = {
       await input.waitFor();
       const path = join(workbench.folder, file);
       await input.fill(path);
+      // The dialog looks at the folder first, and takes no answer meanwhile.
+      await page.waitForTimeout(800);
       await page.locator('.quick-input-widget .monaco-button', { hasText: /^OK$/ }).click();
-      for (let tries = 0; tries < 50 && !existsSync(path); tries++) await page.waitForTimeout(100);
+      for (let tries = 0; tries < 100 && !existsSync(path); tries++) await page.waitForTimeout(100);
       return readFileSync(path);
     };
     assert.match((await save('CSV', 'pulse.csv')).toString(), /^time_from_the_peak_ns,output_power_MW,inversion\r\n/);
