@@ -21,4 +21,4 @@ await build({
   logLevel: 'warning',
 });
 const { bench } = createRequire(import.meta.url)(outfile);
-bench(root);
+await bench(root, process.argv[2]);

@@ -4,7 +4,9 @@ import type { Row } from './table.ts';
 
 const BUDGETS = [
   ['server.cjs', 600],
+  ['server-worker.js', 600],
   ['extension.cjs', 450],
+  ['extension-web.cjs', 450],
   ['giantpulse.cjs', 500],
   ['readout.js', 400],
 ] as const;

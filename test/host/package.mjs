@@ -30,6 +30,8 @@ export function packageExtension() {
     },
   );
   if (status !== 0) throw new Error(`vsce ended with ${status}:\n${stdout}${stderr}`);
+  const { size } = statSync(target);
+  if (size >= 1e6) throw new Error(`the package has ${size} bytes, 1 MB is the most`);
   return target;
 }
 
