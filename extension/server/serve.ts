@@ -11,7 +11,6 @@ import { TextDocument } from 'vscode-languageserver-textdocument';
 import type { Analysis } from '../core/analyse.ts';
 import { diagnostics, internalFailure, relatedDiagnostics } from '../language/diagnostics.ts';
 import { headlineText } from '../language/headline.ts';
-import type { Subject } from '../language/subject.ts';
 import { serverOptions, settingsOf } from '../protocol/guard.ts';
 import {
   type AnalysedParams,
@@ -22,7 +21,7 @@ import {
 } from '../protocol/requests.ts';
 import { createAnalyses } from './analyses.ts';
 import { createAnswers } from './answers.ts';
-import { deepen } from './deepening.ts';
+import { createDeepener } from './deepening.ts';
 import { answerEditor } from './editor-requests.ts';
 import { createPublisher } from './publisher.ts';
 import { answerReadout } from './readout-requests.ts';
@@ -69,6 +68,14 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
     for (const refresh of refreshes) void refresh();
   });
 
+  const deepener = createDeepener(
+    ({ uri, version }) => documents.get(uri)?.version === version,
+    (subject) => {
+      const related = relatedDiagnostics(subject, options.checksUri);
+      const { uri, version } = subject;
+      if (related !== undefined) void connection.sendDiagnostics({ uri, version, diagnostics: related });
+    },
+  );
   const publisher = createPublisher((uri) => {
     const analysed = analyses.of(uri);
     if (analysed === undefined) return;
@@ -86,14 +93,8 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
       warnings: found.filter(({ severity }) => severity === 2).length,
     };
     void connection.sendNotification(analysedNotification, params);
-    if (!('failure' in analysed)) void publishRelated(analysed);
+    if (!('failure' in analysed)) deepener.deepen(analysed);
   });
-  const publishRelated = async (subject: Subject): Promise<void> => {
-    const { uri, version } = subject;
-    if (!(await deepen(subject, () => documents.get(uri)?.version === version))) return;
-    const related = relatedDiagnostics(subject, options.checksUri);
-    if (related !== undefined) void connection.sendDiagnostics({ uri, version, diagnostics: related });
-  };
   documents.onDidChangeContent(({ document }) => publisher.changed(document.uri));
   documents.onDidClose(({ document: { uri } }) => {
     publisher.closed(uri);

@@ -138,18 +138,6 @@ test('settings of the client hold from the start and when they change', async ()
 describe('an answer is of the version asked about, or none', () => {
   const position = { line: 20, character: 4 };
 
-  test('a request that a change overtakes is refused as such', async () => {
-    await server.open(uri, design);
-    await server.problemsOf(uri, 1);
-    const asked = server.connection.sendRequest(HoverRequest.type, { textDocument, position });
-    await server.change(uri, 2, {
-      range: { start: { line: 0, character: 0 }, end: { line: 0, character: 0 } },
-      text: '# a\n',
-    });
-    await expect(asked).rejects.toMatchObject({ code: -32801 });
-    expect(await server.connection.sendRequest(HoverRequest.type, { textDocument, position })).not.toBeNull();
-  });
-
   test('curves stop when the document changes, and the server answers at once', async () => {
     await server.open(uri, design);
     await server.problemsOf(uri, 1);
@@ -179,20 +167,4 @@ describe('an answer is of the version asked about, or none', () => {
     expect(versions).toEqual([...versions].sort((a, b) => a - b));
     expect(new Set(versions).size).toBeLessThan(10);
   });
-});
-
-test('five hundred open designs do not hold up the one that is edited', async () => {
-  const others = Array.from({ length: 500 }, (_, index) => `file:///bench/${index}.gainmodule.yaml`);
-  await Promise.all(others.map((one) => server.open(one, design)));
-  await server.open(uri, design);
-  await server.problemsOf(uri, 1);
-  // It was opened last and comes first: most of the others are still waiting.
-  const before = new Set(server.published.map((params) => params.uri)).size;
-  expect(before).toBeLessThan(250);
-  await server.change(uri, 2, {
-    range: { start: { line: 0, character: 0 }, end: { line: 0, character: 0 } },
-    text: '# a\n',
-  });
-  await server.problemsOf(uri, 2);
-  expect(new Set(server.published.map((params) => params.uri)).size).toBeLessThan(500);
 });
