@@ -13,7 +13,7 @@ import {
 import { type ChartId, chartIds } from '../protocol/chart.ts';
 import { anchorLines } from './check-links.ts';
 import { saveExport } from './exports.ts';
-import { isDesign, languageId } from './language-id.ts';
+import { isDesign } from './language-id.ts';
 import { revealLine } from './reveal-line.ts';
 import type { ServerQuestions } from './server-questions.ts';
 import { checkTask } from './tasks.ts';
@@ -42,11 +42,23 @@ export function registerCommands(context: ExtensionContext, server: ServerQuesti
 /** Opens an unsaved design that predicts a pulse as it is, its title selected. */
 async function newDesign(server: ServerQuestions): Promise<void> {
   const content = await server.template();
-  const editor = await window.showTextDocument(await workspace.openTextDocument({ language: languageId, content }));
+  // With a name of its own: otherwise the first line would be offered as the file's name.
+  const document = await workspace.openTextDocument(freeName());
+  const editor = await window.showTextDocument(document);
+  await editor.edit((edit) => edit.insert(new Position(0, 0), content));
   const at = content.indexOf('title: ');
   if (at < 0) return;
-  const start = editor.document.positionAt(at + 'title: '.length);
-  editor.selection = new Selection(start, new Position(start.line, editor.document.lineAt(start).range.end.character));
+  const start = document.positionAt(at + 'title: '.length);
+  editor.selection = new Selection(start, new Position(start.line, document.lineAt(start).range.end.character));
+}
+
+/** The first of `gain_module.gainmodule.yaml`, `gain_module_2…` that no open document has. */
+function freeName(): Uri {
+  const open = new Set(workspace.textDocuments.map(({ uri }) => uri.path));
+  for (let count = 1; ; count++) {
+    const path = `gain_module${count === 1 ? '' : `_${count}`}.gainmodule.yaml`;
+    if (!open.has(path)) return Uri.from({ scheme: 'untitled', path });
+  }
 }
 
 async function copyFigures(server: ServerQuestions): Promise<void> {
@@ -102,9 +114,20 @@ async function pick<T extends string>(
 /** Opens the section of `checks.md` that explains a code: the one given, else one that is picked. */
 async function explainCheck(context: ExtensionContext, code: string | undefined): Promise<void> {
   const file = Uri.joinPath(context.extensionUri, 'extension/docs/checks.md');
-  const lines = anchorLines(new TextDecoder().decode(await workspace.fs.readFile(file)));
-  const chosen = code ?? (await window.showQuickPick([...lines.keys()], { placeHolder: 'Which check?' }));
-  if (chosen !== undefined) await revealLine(file, lines.get(chosen) ?? 1);
+  const text = new TextDecoder().decode(await workspace.fs.readFile(file));
+  const anchors = anchorLines(text);
+  const chosen = code ?? (await pickCheck(text.split(/\r?\n/), anchors));
+  if (chosen !== undefined) await revealLine(file, anchors.get(chosen) ?? 1);
+}
+
+async function pickCheck(lines: readonly string[], anchors: ReadonlyMap<string, number>): Promise<string | undefined> {
+  const items = [...anchors].map(([code, line]) => {
+    // An anchor stands two lines above the heading of its section.
+    const title = /^##\s+(.*)$/.exec(lines[line + 1] ?? '')?.[1];
+    return { label: title ?? code, description: code };
+  });
+  const options = { placeHolder: 'Which check?', matchOnDescription: true };
+  return (await window.showQuickPick(items, options))?.description;
 }
 
 function designInFront(): Uri | undefined {

@@ -157,7 +157,7 @@ test('an accepted problem asks for nothing any more; an open one can be accepted
   const missed = demo.replace('max: 12 ns }', 'max: 9 ns }');
   const open = bench(missed);
   expect(actionsAt(open, 'max: 9 ns', 6).map(({ title }) => title)).toContain(
-    'Accept `requirement-missed`: write the reason behind it',
+    'Accept requirement-missed: write the reason behind it',
   );
   const accepted = bench(missed.replace('max: 9 ns }', 'max: 9 ns } # accept requirement-missed: short cable'));
   expect(actionsAt(accepted, 'max: 9 ns', 6).filter(({ kind }) => kind === 'quickfix')).toEqual([]);

@@ -134,7 +134,7 @@ export function acceptanceFix(text: string, { code, range }: Problem): Fix {
   const indent = text.slice(at, lineAt(text, range.start).start);
   const blank = indent.trim() === '' ? indent : '';
   return {
-    title: `Accept \`${code}\`: write the reason behind it`,
+    title: `Accept ${code}: write the reason behind it`,
     range: { start: at, end: at },
     text: `${blank}# accept ${code}: \n`,
   };

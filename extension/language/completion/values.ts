@@ -40,7 +40,12 @@ function unitOffers(typed: string, { dimension }: QuantitySchema): Offer[] {
   return DIMENSIONS[dimension].units.flatMap((unit, index) => {
     const text = `${number} ${unit}`;
     if ('problem' in readQuantity(text, dimension)) return [];
-    return [{ ...offer(text, DIMENSIONS[dimension].noun, index, kinds.unit), filterText: `${number}${gap}${unit}` }];
+    return [
+      {
+        ...offer(text, DIMENSIONS[dimension].noun.replace(/^an? /, ''), index, kinds.unit),
+        filterText: `${number}${gap}${unit}`,
+      },
+    ];
   });
 }
 
