@@ -1,6 +1,6 @@
 import { commands, languages, Position, TabInputWebview, window } from 'vscode';
 import * as assert from './assert.ts';
-import { type Case, hoverText, ourExtension, placeOf, problemsOf, show, until } from './harness.ts';
+import { type Case, hoverText, ourExtension, placeOf, problemsOf, say, show, until } from './harness.ts';
 
 const sound = 'transmitter.gainmodule.yaml';
 
@@ -15,7 +15,9 @@ export const editing: readonly Case[] = [
     async run() {
       assert.equal((await show('short_name.gainmodule.yml')).languageId, 'gainmodule');
       assert.equal((await show(sound)).languageId, 'gainmodule');
+      const begin = performance.now();
       await ourExtension().activate();
+      say(`activation, from the opened design to a server that answers: ${(performance.now() - begin).toFixed(0)} ms`);
       assert.equal(ourExtension().isActive, true);
     },
   },
