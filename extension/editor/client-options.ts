@@ -3,7 +3,7 @@ import type { LanguageClientOptions } from 'vscode-languageclient';
 import { settingsOf } from '../protocol/guard.ts';
 import type { ServerOptions } from '../protocol/requests.ts';
 import { anchorLines, linkTo } from './check-links.ts';
-import { languageId } from './language-id.ts';
+import { languageId } from './designs.ts';
 
 const section = 'giantpulse';
 

@@ -12,8 +12,8 @@ import {
 } from 'vscode';
 import { type ChartId, chartIds } from '../protocol/chart.ts';
 import { anchorLines } from './check-links.ts';
+import { designInFront } from './designs.ts';
 import { saveExport } from './exports.ts';
-import { isDesign } from './language-id.ts';
 import { revealLine } from './reveal-line.ts';
 import type { ServerQuestions } from './server-questions.ts';
 import { checkTask } from './tasks.ts';
@@ -128,9 +128,4 @@ async function pickCheck(lines: readonly string[], anchors: ReadonlyMap<string, 
   });
   const options = { placeHolder: 'Which check?', matchOnDescription: true };
   return (await window.showQuickPick(items, options))?.description;
-}
-
-function designInFront(): Uri | undefined {
-  const document = window.activeTextEditor?.document;
-  return document !== undefined && isDesign(document) ? document.uri : undefined;
 }

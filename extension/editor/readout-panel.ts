@@ -9,7 +9,7 @@ import {
   window,
 } from 'vscode';
 import { isPageMemory } from '../protocol/guard.ts';
-import { isDesign } from './language-id.ts';
+import { designInFront, isDesign } from './designs.ts';
 import type { Pins } from './pins.ts';
 import { createReadout, type Readout } from './readout.ts';
 import type { ServerQuestions } from './server-questions.ts';
@@ -91,9 +91,4 @@ export function registerReadout(context: ExtensionContext, server: ServerQuestio
     }),
   );
   return { analysed: (uri) => readout?.analysed(uri), dispose: () => registered.dispose() };
-}
-
-function designInFront(): Uri | undefined {
-  const document = window.activeTextEditor?.document;
-  return document !== undefined && isDesign(document) ? document.uri : undefined;
 }

@@ -1,6 +1,6 @@
 import { type Disposable, MarkdownString, StatusBarAlignment, type Uri, window } from 'vscode';
 import type { AnalysedParams } from '../protocol/requests.ts';
-import { isDesign } from './language-id.ts';
+import { counted, isDesign } from './designs.ts';
 
 export interface Status extends Disposable {
   analysed(params: AnalysedParams): void;
@@ -38,8 +38,4 @@ export function createStatus(uriOf: (uri: Uri) => string): Status {
       item.dispose();
     },
   };
-}
-
-function counted(count: number, noun: string): string {
-  return `${count} ${noun}${count === 1 ? '' : 's'}`;
 }

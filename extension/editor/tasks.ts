@@ -7,11 +7,9 @@ import {
   type TaskDefinition,
   TaskScope,
   tasks,
-  type Uri,
-  window,
   workspace,
 } from 'vscode';
-import { isDesign } from './language-id.ts';
+import { counted, designInFront } from './designs.ts';
 import type { ServerQuestions } from './server-questions.ts';
 
 export const taskType = 'giantpulse';
@@ -70,7 +68,9 @@ function terminal(run: (print: (line: string) => void) => Promise<number>): Pseu
 /** 0 without errors, 1 with errors, 2 where nothing could be checked: as the command ends. */
 async function check(what: What, server: ServerQuestions, print: (line: string) => void): Promise<number> {
   const designs =
-    what === 'design' ? designInFront() : await workspace.findFiles('**/*.gainmodule.{yaml,yml}', '**/node_modules/**');
+    what === 'design'
+      ? [designInFront()].filter((uri) => uri !== undefined)
+      : await workspace.findFiles('**/*.gainmodule.{yaml,yml}', '**/node_modules/**');
   if (designs.length === 0) {
     print(
       what === 'design'
@@ -95,13 +95,4 @@ async function check(what: What, server: ServerQuestions, print: (line: string) 
     `${counted(designs.length, 'design')} checked: ${counted(errors, 'error')}, ${counted(warnings, 'warning')}${also}`,
   );
   return errors === 0 ? 0 : 1;
-}
-
-function designInFront(): Uri[] {
-  const document = window.activeTextEditor?.document;
-  return document !== undefined && isDesign(document) ? [document.uri] : [];
-}
-
-function counted(count: number, noun: string): string {
-  return `${count} ${noun}${count === 1 ? '' : 's'}`;
 }

@@ -10,7 +10,8 @@ import {
 } from 'chart.js';
 import type { Bar, BarChart } from '../../extension/protocol/chart.ts';
 import { createCanvasChart, type DrawnChart } from './canvas-chart.ts';
-import { type ChartTheme, named } from './style.ts';
+import { named, tooltipStyle } from './style.ts';
+import type { ChartTheme } from './theme.ts';
 
 const longestLabel = 24;
 
@@ -68,13 +69,7 @@ function configure({ bars, axis }: BarChart, theme: ChartTheme): ChartConfigurat
       },
       plugins: {
         tooltip: {
-          backgroundColor: theme.surface,
-          borderColor: theme.border,
-          borderWidth: 1,
-          titleColor: theme.text,
-          bodyColor: theme.text,
-          titleFont: { family: theme.font },
-          bodyFont: { family: theme.font },
+          ...tooltipStyle(theme),
           callbacks: {
             title: (items) => bars[items[0]?.dataIndex ?? -1]?.label ?? '',
             label: ({ dataIndex }) => told(bars[dataIndex], axis.unit),

@@ -11,7 +11,8 @@ import {
 import type { Axis, LineChart } from '../../extension/protocol/chart.ts';
 import { createCanvasChart, type DrawnChart } from './canvas-chart.ts';
 import { marksPlugin } from './marks.ts';
-import { type ChartTheme, named } from './style.ts';
+import { named, tooltipStyle } from './style.ts';
+import type { ChartTheme } from './theme.ts';
 
 type Point = { x: number; y: number };
 
@@ -68,13 +69,7 @@ function configure(
       },
       plugins: {
         tooltip: {
-          backgroundColor: theme.surface,
-          borderColor: theme.border,
-          borderWidth: 1,
-          titleColor: theme.text,
-          bodyColor: theme.text,
-          titleFont: { family: theme.font },
-          bodyFont: { family: theme.font },
+          ...tooltipStyle(theme),
           callbacks: {
             title: (items) => `${named(x)}: ${items[0]?.parsed.x?.toPrecision(3) ?? ''}`,
             label: ({ dataset, parsed }) => `${dataset.label ?? ''}: ${parsed.y?.toPrecision(3) ?? ''}`,
