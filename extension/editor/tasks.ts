@@ -7,6 +7,7 @@ import {
   type TaskDefinition,
   TaskScope,
   tasks,
+  type Uri,
   workspace,
 } from 'vscode';
 import { counted, designInFront } from './designs.ts';
@@ -81,9 +82,7 @@ async function check(what: What, server: ServerQuestions, print: (line: string) 
   }
   const total = { errors: 0, warnings: 0, accepted: 0 };
   for (const uri of [...designs].sort((a, b) => (a.path < b.path ? -1 : 1))) {
-    // An open document as it stands, saved or not; otherwise the file.
-    const document = await workspace.openTextDocument(uri);
-    const result = await server.check({ file: workspace.asRelativePath(uri), text: document.getText() });
+    const result = await server.check({ file: workspace.asRelativePath(uri), text: await textOf(uri) });
     for (const line of result.lines) print(line);
     total.errors += result.errors;
     total.warnings += result.warnings;
@@ -95,4 +94,10 @@ async function check(what: What, server: ServerQuestions, print: (line: string) 
     `${counted(designs.length, 'design')} checked: ${counted(errors, 'error')}, ${counted(warnings, 'warning')}${also}`,
   );
   return errors === 0 ? 0 : 1;
+}
+
+/** An open document as it stands, saved or not; otherwise the file, which is not opened for that. */
+async function textOf(uri: Uri): Promise<string> {
+  const open = workspace.textDocuments.find((document) => document.uri.toString() === uri.toString());
+  return open?.getText() ?? new TextDecoder().decode(await workspace.fs.readFile(uri));
 }
