@@ -41,7 +41,8 @@ function table({ effects, value }: Sensitivity, path: string): string {
   const row = (label: string, change: number) =>
     `| ${label} | ${names.map((name) => signedPercent((effects[name] ?? 0) * change)).join(' | ')} |`;
   return [
-    `| Change | ${names.map((name) => effectLabels[name]).join(' | ')} |`,
+    // Wide blanks keep the columns apart: editors draw tables without any.
+    `| Change | ${names.map((name) => `\u2003${effectLabels[name]}`).join(' | ')} |`,
     `|:--|${names.map(() => '--:').join('|')}|`,
     row('+1 %', 0.01),
     ...(IN_POINTS.test(path) ? [row('+1 percentage point', 0.01 / value)] : []),
