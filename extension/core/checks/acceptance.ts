@@ -12,6 +12,9 @@ export const ACCEPTANCE_CODES = [
   { code: 'acceptance-unused', title: 'An acceptance no longer applies' },
 ] as const;
 
+/** Acceptances read of one file; what comes after accepts nothing. */
+const MOST_ACCEPTANCES = 500;
+
 /** `# accept <code>: reason` as the text has it. */
 interface Acceptance {
   readonly code: string;
@@ -61,7 +64,7 @@ function acceptableCodes(): string[] {
 }
 
 function acceptancesIn(text: string, root: TreeNode | undefined): Acceptance[] {
-  return [...text.matchAll(COMMENT)].flatMap((match) => {
+  return [...text.matchAll(COMMENT)].slice(0, MOST_ACCEPTANCES).flatMap((match) => {
     const { index } = match;
     const [whole, code = '', reason = ''] = match;
     // Text in quotes or in a block may hold the same words.

@@ -13,6 +13,8 @@ export interface Parameter {
   readonly tolerance?: number;
 }
 
+const MOST_PARAMETERS = 400;
+
 const BESIDE_THE_PULSE = /^(requirements|x-|title$|format$)/;
 
 /** The number at a path, written or filled in; undefined for everything else. */
@@ -29,11 +31,11 @@ export function parameterAt({ design, resolved }: Analysis, path: string): Param
   return { path, value, ...(tolerance !== undefined && { tolerance }) };
 }
 
-/** Every such number that the file writes, in its order; what a merge brings in counts where it is used. */
+/** The numbers that the file writes, in its order, 400 at most; what a merge brings in counts where it is used. */
 export function writtenParameters(analysis: Analysis): readonly Parameter[] {
   const found: Parameter[] = [];
   const visit = (node: TreeNode): void => {
-    if (BESIDE_THE_PULSE.test(node.path)) return;
+    if (BESIDE_THE_PULSE.test(node.path) || found.length >= MOST_PARAMETERS) return;
     const parameter = node.kind === 'scalar' ? parameterAt(analysis, node.path) : undefined;
     if (parameter !== undefined) found.push(parameter);
     for (const child of node.entries?.values() ?? node.items ?? []) visit(child);

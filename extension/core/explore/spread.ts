@@ -11,17 +11,22 @@ export interface Spread {
   readonly share: number;
 }
 
+/** Two predictions for each. */
+const MOST_TOLERANCES = 100;
+
 export type Spreads = Readonly<Partial<Record<EffectName, Spread>>>;
 
 /**
  * Root of the sum of squares of each tolerance's effect, taken as independent: the law of propagation of uncertainty
- * for uncorrelated inputs (JCGM 100:2008, 5.1.2, first order). Empty where nothing has a tolerance.
+ * for uncorrelated inputs (JCGM 100:2008, 5.1.2, first order). Empty where nothing has a tolerance, and where more have
+ * one than an answer at once can take.
  */
 export function spreadsOf(
   parameters: readonly Parameter[],
   sensitivity: (path: string) => Sensitivity | undefined,
 ): Spreads {
   const spreads: Partial<Record<EffectName, Spread>> = {};
+  if (parameters.filter(({ tolerance }) => tolerance !== undefined).length > MOST_TOLERANCES) return spreads;
   const toleranced = parameters.flatMap(({ path, value, tolerance }) => {
     const found = tolerance === undefined || value === 0 ? undefined : sensitivity(path);
     return found && tolerance ? [{ path, effects: found.effects, relative: tolerance / Math.abs(value) }] : [];
