@@ -52,7 +52,7 @@ export function serve(connection: Connection, analyse: (text: string) => Analysi
         textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
         hoverProvider: true,
         codeActionProvider: { codeActionKinds: [CodeActionKind.QuickFix] },
-        completionProvider: { triggerCharacters: [' ', ':', '{', ',', '\n'] },
+        completionProvider: { triggerCharacters: [' ', ':', '{', ','] },
         codeLensProvider: { resolveProvider: false },
         inlayHintProvider: { resolveProvider: false },
         documentSymbolProvider: true,

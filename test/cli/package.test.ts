@@ -22,7 +22,9 @@ describe('what is packed', () => {
   test.each([
     'dist/giantpulse.cjs',
     'dist/server.cjs',
+    'dist/server-worker.js',
     'dist/extension.cjs',
+    'dist/extension-web.cjs',
     'dist/readout.js',
     'dist/readout.css',
     'schemas/gain-module.schema.json',
@@ -40,6 +42,11 @@ describe('what is packed', () => {
 
   test('holds no tests, no sources and no packages', () => {
     expect(files.filter((file) => /^(test|webview|node_modules)\/|\.ts$|\.map$/.test(file))).toEqual([]);
+  });
+
+  test('holds of what has been built only what is shipped, not the benchmark beside it', () => {
+    const shipped = /^dist\/(giantpulse\.cjs|server\.cjs|server-worker\.js|extension(-web)?\.cjs|readout\.(js|css))$/;
+    expect(files.filter((file) => file.startsWith('dist/') && !shipped.test(file))).toEqual([]);
   });
 
   test('the command can be started by its name', () => {

@@ -25,8 +25,6 @@ export function packageExtension() {
     {
       cwd: project,
       encoding: 'utf8',
-      // Its `prepublish` script would build again what has just been built.
-      env: { ...process.env, VSCE_STORE: 'file' },
     },
   );
   if (status !== 0) throw new Error(`vsce ended with ${status}:\n${stdout}${stderr}`);

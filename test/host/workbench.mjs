@@ -88,8 +88,9 @@ export async function startWorkbench({ vsix, web = false } = {}) {
   });
   const ended = new Promise((done) => child.once('exit', done));
   const kill = () => signal(child, 'SIGKILL');
-  // Also where the tests die half-way: no server stays behind.
+  // Also where the tests die half-way or are stopped: no server stays behind.
   process.once('exit', kill);
+  for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.once(name, () => process.exit(1));
   const port = await listeningPort(child, log, ended);
   return {
     folder,
