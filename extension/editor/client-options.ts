@@ -17,12 +17,13 @@ export async function clientOptions(context: ExtensionContext): Promise<Language
     settings: settingsOf(workspace.getConfiguration(section)),
   };
   return {
-    // Whatever the file system: the server is handed the text and reads no files.
+    // Whatever the file system, an old version beside a diff too: the server is handed the text and reads no files.
     documentSelector: [{ language: languageId }],
     initializationOptions,
     synchronize: { configurationSection: section },
     middleware: {
       handleDiagnostics(uri, diagnostics, next) {
+        if (isOnlyLookedAt(uri)) return next(uri, []);
         for (const diagnostic of diagnostics) {
           const { code } = diagnostic;
           if (typeof code === 'object') {
@@ -33,6 +34,14 @@ export async function clientOptions(context: ExtensionContext): Promise<Language
       },
     },
   };
+}
+
+/**
+ * An old version beside a diff, say: read-only, and no file of the workspace. Hovers and figures help to compare; its
+ * problems can't be mended and would count twice in the list.
+ */
+function isOnlyLookedAt(uri: Uri): boolean {
+  return workspace.fs.isWritableFileSystem(uri.scheme) === false && workspace.getWorkspaceFolder(uri) === undefined;
 }
 
 /** Without the file the links still open it, or say that it is not there: no reason to stop. */

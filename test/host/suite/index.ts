@@ -4,6 +4,7 @@ import { features } from './features.ts';
 import { say, writeReport } from './harness.ts';
 import { problems } from './problems.ts';
 import { surroundings } from './surroundings.ts';
+import { virtualFiles } from './virtual-files.ts';
 
 /** VS Code calls this in its extension host. The closing line is the only proof that the suite ran to its end. */
 export async function run(): Promise<void> {
@@ -11,7 +12,7 @@ export async function run(): Promise<void> {
   say(`VS Code ${version} on ${env.appHost}, extensions in ${worker ? 'a web worker' : 'a process of Node'}`);
   let passed = 0;
   let failed = 0;
-  for (const { name, run: test } of [...editing, ...problems, ...features, ...surroundings]) {
+  for (const { name, run: test } of [...editing, ...problems, ...features, ...surroundings, ...virtualFiles]) {
     const start = performance.now();
     try {
       await test();
