@@ -59,7 +59,9 @@ if (process.env.GIANTPULSE_DESKTOP_CODE !== undefined) parts.push('desktop.mjs')
 let passed = 0;
 let failed = 0;
 for (const part of parts) {
+  const start = performance.now();
   const counts = await run(part);
+  console.log(`${part}: ${((performance.now() - start) / 1000).toFixed(0)} s`);
   passed += counts.passed;
   failed += counts.failed;
 }
