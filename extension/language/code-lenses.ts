@@ -1,11 +1,12 @@
 import type { CodeLens } from 'vscode-languageserver-protocol';
 import type { Analysis } from '../core/analyse.ts';
 import { tightestMargin } from '../core/explore/margins.ts';
+import { oneLine, shortened } from './one-line.ts';
 import { show } from './show.ts';
 import type { Subject } from './subject.ts';
 
 const LONGEST_NAME = 32;
-const LONGEST_REASON = 100;
+const LONGEST_REASON = 120;
 
 /**
  * One lens on the first line, for any text: the predicted pulse, or why there is none. It never comes or goes, so that the
@@ -34,9 +35,7 @@ function pulseLine({ prediction, outcome }: Analysis): string | undefined {
 }
 
 function placed({ kind, name }: { readonly kind: string; readonly name: string }): string {
-  const line = name.replace(/\s+/g, ' ').trim();
-  const short = line.length > LONGEST_NAME ? `${line.slice(0, LONGEST_NAME - 1)}…` : line;
-  return kind === 'damage' ? `on ${short}` : 'of hold-off';
+  return kind === 'damage' ? `on ${shortened(oneLine(name), LONGEST_NAME)}` : 'of hold-off';
 }
 
 /** Why there is no pulse, in the space of one line: the first error's first sentence, and where it is. */
@@ -44,9 +43,10 @@ function absenceLine({ problems }: Analysis, lineOf: (offset: number) => number)
   const errors = problems.filter(({ severity }) => severity === 'error');
   const [first] = errors;
   if (first === undefined) return 'No pulse predicted';
-  const sentence = /^.*?[.?](?= |$)/.exec(first.message)?.[0] ?? first.message;
-  const told = sentence.replaceAll('`', '').replace(/\.$/, '').slice(0, LONGEST_REASON);
+  const message = oneLine(first.message.replaceAll('`', ''));
+  const sentence = /^.*?[.?](?= |$)/.exec(message)?.[0] ?? message;
+  const told = shortened(sentence.replace(/\.$/, ''), LONGEST_REASON);
   const more = errors.length === 1 ? '' : `, and ${errors.length - 1} more`;
-  const opening = told.startsWith('No ') ? '' : 'No pulse predicted: ';
+  const opening = told.startsWith('No pulse') ? '' : 'No pulse predicted: ';
   return `${opening}${told} (line ${lineOf(first.range.start)}${more})`;
 }

@@ -5,7 +5,7 @@ import type { Subject } from './subject.ts';
 /** Every section and list item of more than one line, and every run of comment lines; blank lines at the end stay outside. */
 export function foldingRanges({ analysis, toRange, text }: Subject): FoldingRange[] {
   const found: FoldingRange[] = [];
-  const lines = text.split('\n');
+  const lines = text.split(/\r\n|\r|\n/);
   const visit = (node: TreeNode): void => {
     const start = toRange({ start: node.extent.start, end: node.extent.start }).start.line;
     const end = node.extent.start + text.slice(node.extent.start, node.extent.end).trimEnd().length;

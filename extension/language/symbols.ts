@@ -1,12 +1,13 @@
 import type { DocumentSymbol, SymbolKind } from 'vscode-languageserver-protocol';
 import type { TreeNode } from '../core/design/tree.ts';
 import type { TextRange } from '../core/report/problem.ts';
+import { oneLine, shortened } from './one-line.ts';
 import type { Subject } from './subject.ts';
 
 /** LSP's numbers: 3 namespace, 18 array, 15 string, 16 number, 19 object. */
 const kinds = { section: 19, list: 18, number: 16, text: 15 } as const satisfies Record<string, SymbolKind>;
 
-const LONGEST_DETAIL = 60;
+const LONGEST_LABEL = 60;
 
 /** Sections, keys and list items of a design as they are nested in the text; what a merge brings in stands elsewhere. */
 export function documentSymbols({ analysis, toRange }: Subject): DocumentSymbol[] {
@@ -18,19 +19,18 @@ function childrenOf(node: TreeNode, within: TextRange, toRange: Subject['toRange
   const children = [...(node.entries?.entries() ?? [])].map(([name, child]) => ({ name, child }));
   const items = (node.items ?? []).map((child, index) => ({ name: itemName(child, index), child }));
   return [...children, ...items].flatMap(({ name, child }): DocumentSymbol[] => {
-    // An alias shows where it stands, without what it stands for: editors want children inside their parents.
-    const aliased = child.value.start !== child.written.start && child.kind !== 'map' && child.kind !== 'list';
+    // What an alias stands for is written elsewhere: editors refuse children outside of their parents.
     if (child.merged || !inside(child.extent, within)) return [];
     const selection = child.key ?? child.value;
     const range = {
       start: Math.min(child.extent.start, selection.start),
       end: Math.max(child.extent.end, selection.end),
     };
-    const inner = aliased ? [] : childrenOf(child, range, toRange);
-    const detail = child.kind === 'scalar' ? (child.text ?? '').replace(/\s+/g, ' ').slice(0, LONGEST_DETAIL) : '';
+    const inner = childrenOf(child, range, toRange);
+    const detail = child.kind === 'scalar' ? label(child.text ?? '') : '';
     return [
       {
-        name: name.trim() === '' ? '(no name)' : name,
+        name: label(name) === '' ? '(no name)' : label(name),
         ...(detail !== '' && { detail }),
         kind: kindOf(child),
         range: toRange(range),
@@ -39,6 +39,10 @@ function childrenOf(node: TreeNode, within: TextRange, toRange: Subject['toRange
       },
     ];
   });
+}
+
+function label(text: string): string {
+  return shortened(oneLine(text), LONGEST_LABEL);
 }
 
 function inside(inner: TextRange, outer: TextRange): boolean {

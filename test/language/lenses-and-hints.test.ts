@@ -30,6 +30,15 @@ describe('the lens at the head', () => {
         .replace(/ {2}(closed_loss|opening_time|opens_at|gate): .*\n/g, ''),
       /^No pulse predicted: This release predicts actively switched modules only/,
     ],
+    [
+      demo.replace('600 W ± 3 %', '*none'),
+      /^No pulse predicted: No anchor &none stands before this alias \(line \d+\)$/,
+    ],
+    [
+      demo.replace('material: Nd:YAG', 'material'),
+      /^No pulse predicted: This line has no : of its own \(line 6\)$/,
+    ],
+    [demo.replace('closed_loss: 99.5 %', 'closed_loss: 100 %'), /[a-z]… \(line \d+\)$/],
   ])('stays, and says why there is no pulse', (text, title) => {
     const lenses = codeLenses(bench(text).subject, 'a.command');
     expect(lenses).toHaveLength(1);

@@ -56,6 +56,15 @@ describe('symbols', () => {
     ]);
   });
 
+  test('have names and values of one line, and not longer than a list has room for', () => {
+    const [, first, second] = documentSymbols(
+      bench(`format: 1\n"a\\nb": "1\\r\\n2"\nx-${'y'.repeat(99)}: ${'word '.repeat(40)}\n`).subject,
+    );
+    expect(first).toMatchObject({ name: 'a b', detail: '1 2' });
+    expect(second?.name).toHaveLength(60);
+    expect(second?.detail).toMatch(/^(word )+word…$/);
+  });
+
   // An editor refuses symbols whose children or names stand outside of them.
   test.each([
     demo,
@@ -126,6 +135,15 @@ describe('folding', () => {
       { startLine: 0, endLine: 1, kind: 'comment' },
       { startLine: 5, endLine: 6, kind: 'comment' },
     ]);
+  });
+
+  test('counts lines as the editor does, whichever way they end', () => {
+    const folds = foldingRanges(bench(demo).subject);
+    for (const ending of ['\r\n', '\r']) {
+      const text = '# one\n# two\n'.replaceAll('\n', ending);
+      expect(foldingRanges(bench(text).subject)).toEqual([{ startLine: 0, endLine: 1, kind: 'comment' }]);
+    }
+    expect(foldingRanges(bench(demo.replaceAll('\n', '\r\n')).subject)).toEqual(folds);
   });
 
   test('leaves a comment above a section to that section', () => {

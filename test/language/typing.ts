@@ -1,4 +1,4 @@
-import type { Range } from 'vscode-languageserver-protocol';
+import type { DocumentSymbol, Range } from 'vscode-languageserver-protocol';
 import { TextDocument } from 'vscode-languageserver-textdocument';
 import { analyse } from '../../extension/core/analyse.ts';
 import { codeActions } from '../../extension/language/code-actions.ts';
@@ -26,7 +26,8 @@ export interface Typed {
 /**
  * Types a design character by character into one document, as an editor would, and asks for every feature at the cursor
  * after each. Faults: what throws, a range outside the text, a figure that is not that of the text as it stands.
- * `actions`: every so many characters code actions are asked for as well, since they solve for values.
+ * `actions`: every so many characters code actions are asked for as well, since they solve for values, and the analysis
+ * kept for the document is compared with one made anew.
  */
 export function typeThrough(text: string, actions = 25): Typed {
   const uri = 'file:///typed.gainmodule.yaml';
@@ -68,12 +69,35 @@ function look(subject: Subject, document: TextDocument, withActions: boolean): s
   for (const { range } of diagnostics(subject)) inside('a problem', range);
   for (const { textEdit } of completion(subject, offset))
     if (textEdit && 'range' in textEdit) inside('a completion', textEdit.range);
-  for (const { range } of documentSymbols(subject)) inside('a symbol', range);
+  const symbols = documentSymbols(subject);
+  for (const { range } of symbols) inside('a symbol', range);
+  if (!isNested(symbols, document)) faults.push('symbols outside of their parents');
   for (const { endLine } of foldingRanges(subject))
     if (endLine >= document.lineCount) faults.push('a fold outside the text');
   definition(subject, offset);
-  if (withActions) codeActions(subject, { start: Math.max(0, offset - 40), end: offset }, undefined);
+  if (withActions) {
+    codeActions(subject, { start: Math.max(0, offset - 40), end: offset }, undefined);
+    const fresh = analyse(text);
+    const same = (key: 'prediction' | 'problems') =>
+      JSON.stringify(subject.analysis[key]) === JSON.stringify(fresh[key]);
+    if (!same('prediction')) faults.push('a prediction of another text');
+    if (!same('problems')) faults.push('problems of another text');
+  }
   return [...faults, ...staleFigures(subject)];
+}
+
+/** Whether each symbol holds its name and its children, without which an editor refuses them all. */
+function isNested(symbols: readonly DocumentSymbol[], document: TextDocument): boolean {
+  const holds = (outer: Range, inner: Range): boolean =>
+    document.offsetAt(outer.start) <= document.offsetAt(inner.start) &&
+    document.offsetAt(inner.end) <= document.offsetAt(outer.end);
+  return symbols.every(
+    ({ name, range, selectionRange, children = [] }) =>
+      name !== '' &&
+      holds(range, selectionRange) &&
+      children.every((child) => holds(range, child.range)) &&
+      isNested(children, document),
+  );
 }
 
 /** Figures shown anywhere against those of the text as it stands. */
@@ -87,7 +111,7 @@ function staleFigures(subject: Subject): string[] {
   const state = readout(subject);
   return [
     ...(lenses.length === 1 && lenses[0]?.range.start.line === 0 ? [] : ['not one lens on the first line']),
-    ...((energy === undefined ? /^No /.test(title) : title.startsWith(`${energy} · `))
+    ...((energy === undefined ? /^No pulse/.test(title) : title.startsWith(`${energy} · `))
       ? []
       : [`a lens of another text: ${title}`]),
     ...(hints.every(({ label }) => !String(label).startsWith('stored') || label === `stored ${stored}`)
