@@ -11,6 +11,9 @@ export function definition({ analysis, uri, toRange, text }: Subject, offset: nu
   return { uri, range: toRange({ start: written.start, end: written.end }) };
 }
 
+const LONGEST_LINE = 1000;
+/** A merge's line, or one item of a merge of several sections. */
+const MERGE = /(?:^|[\s{,])["']?<<["']?\s*:|^\s*-\s+\*/;
 const ALIAS = /\*([^\s,[\]{}]+)/g;
 
 /** A merge, `<<: *beam`, leaves no node of its own: its anchor is found by name, the last one above it. */
@@ -18,7 +21,7 @@ function mergeTarget(text: string, offset: number, uri: string, toRange: Subject
   const lineStart = text.lastIndexOf('\n', offset - 1) + 1;
   const lineEnd = text.indexOf('\n', offset);
   const line = text.slice(lineStart, lineEnd < 0 ? text.length : lineEnd);
-  if (!/(?:^|[\s{,])["']?<<["']?\s*:/.test(line)) return undefined;
+  if (!MERGE.test(line)) return undefined;
   for (const { index, 0: whole, 1: name = '' } of line.matchAll(ALIAS)) {
     const start = lineStart + index;
     if (offset < start || offset > start + whole.length) continue;
@@ -31,7 +34,13 @@ function mergeTarget(text: string, offset: number, uri: string, toRange: Subject
 function lastAnchor(above: string, name: string): number | undefined {
   for (let at = above.lastIndexOf(`&${name}`); at >= 0; at = at === 0 ? -1 : above.lastIndexOf(`&${name}`, at - 1)) {
     const next = above[at + name.length + 1] ?? ' ';
-    if (/[\s,[\]{}]/.test(next) && /[\s:[{,-]/.test(above[at - 1] ?? ' ')) return at;
+    if (/[\s,[\]{}]/.test(next) && /[\s:[{,-]/.test(above[at - 1] ?? ' ') && !inComment(above, at)) return at;
   }
   return undefined;
+}
+
+/** Looks back no further than any line that is read, so that one of a million characters costs no more. */
+function inComment(text: string, at: number): boolean {
+  const near = text.slice(Math.max(0, at - LONGEST_LINE), at);
+  return /(?:^|\s)#/.test(near.slice(near.lastIndexOf('\n') + 1));
 }

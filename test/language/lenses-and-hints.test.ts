@@ -34,10 +34,7 @@ describe('the lens at the head', () => {
       demo.replace('600 W ± 3 %', '*none'),
       /^No pulse predicted: No anchor &none stands before this alias \(line \d+\)$/,
     ],
-    [
-      demo.replace('material: Nd:YAG', 'material'),
-      /^No pulse predicted: This line has no : of its own \(line 6\)$/,
-    ],
+    [demo.replace('material: Nd:YAG', 'material'), /^No pulse predicted: This line has no : of its own \(line 6\)$/],
     [demo.replace('closed_loss: 99.5 %', 'closed_loss: 100 %'), /[a-z]… \(line \d+\)$/],
   ])('stays, and says why there is no pulse', (text, title) => {
     const lenses = codeLenses(bench(text).subject, 'a.command');

@@ -104,6 +104,15 @@ describe('definition', () => {
     expect(target(here.at('<<: *rod', 6))).toBe('&rod');
   });
 
+  test('of one of several merged sections is its anchor, not a note about it', () => {
+    const several = bench(
+      'x-a: &a\n  length: 1 mm # see &b\nx-b: &b { length: 2 mm }\n# then &a again\nresonator:\n  <<:\n    - *a\n    - *b\n',
+    );
+    const lineOf = (text: string) => definition(several.subject, several.at(text, 3))?.range.start.line;
+    expect(lineOf('- *a')).toBe(0);
+    expect(lineOf('- *b')).toBe(2);
+  });
+
   test('is nowhere for anything else', () => {
     for (const place of ['title:', '600 W', 'x-mode', '&mode', '<<:']) expect(target(here.at(place))).toBeUndefined();
     expect(definition(bench('').subject, 0)).toBeUndefined();
