@@ -37,6 +37,7 @@ export const surroundings: readonly Case[] = [
       await commands.executeCommand('giantpulse.newDesign');
       const editor = await until('the editor', () => window.activeTextEditor);
       assert.equal(editor.document.languageId, 'gainmodule');
+      assert.match(editor.document.uri.path, /^gain_module(_\d+)?\.gainmodule\.yaml$/);
       assert.equal(editor.document.getText(editor.selection), 'New gain module');
       await until('no problem', async () => problemsOf(editor.document).length === 0 || undefined);
       await commands.executeCommand('workbench.action.revertAndCloseActiveEditor');
