@@ -41,6 +41,22 @@ export function scrolling(
   return element('div', box, table(caption, columns, rows));
 }
 
+/** Puts what `scrolling` made in the place of an earlier one: the box stays, with its focus and where it is scrolled to. */
+export function refill(holder: HTMLElement, box: HTMLElement): void {
+  const old = holder.firstElementChild;
+  if (old === null || old.className !== box.className) holder.replaceChildren(box);
+  else {
+    old.setAttribute('aria-label', box.getAttribute('aria-label') ?? '');
+    old.replaceChildren(...box.childNodes);
+  }
+}
+
+/** A quantity in words; where room is short it breaks between figures, never inside one. */
+export function quantity(text: string): HTMLElement {
+  const pieces = text.split(/(?<!\d) /).map((piece) => element('span', { class: 'whole' }, piece));
+  return element('span', {}, ...pieces.flatMap((piece, index) => (index === 0 ? [piece] : [' ', piece])));
+}
+
 function table(caption: string, columns: readonly Column[], rows: readonly (readonly Child[])[]): HTMLElement {
   const classOf = (index: number): Readonly<Record<string, string>> =>
     columns[index]?.numeric === true ? { class: 'number' } : {};

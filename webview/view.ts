@@ -30,10 +30,14 @@ const headings: Readonly<Record<ChartId, string>> = {
   surfaces: 'Fluence on the surfaces',
 };
 
+/** The charts that come a moment after the state. */
+const curveIds = ['reflectivity', 'pump', 'repetition_rate'] as const;
+
 /** Builds the page once; a new state replaces the bodies of its parts, so that nothing jumps or loses the focus. */
 export function createView(root: HTMLElement, tables: readonly ChartId[], actions: ViewActions): View {
   let shown: ReadoutState | undefined;
   let pinned: Pinned | undefined;
+  let curves: ExplorationState | undefined;
   let announced: string | undefined;
   const title = element('h1', {}, 'Pulse readout');
   const model = element('p', { class: 'model' });
@@ -79,7 +83,10 @@ export function createView(root: HTMLElement, tables: readonly ChartId[], action
     pin.textContent = pinned === undefined ? 'Pin this state' : 'Unpin';
     pinNote.hidden = pinned === undefined;
     pinNote.textContent =
-      pinned === undefined ? '' : 'Changes are against the pinned state, drawn dotted in the charts.';
+      pinned === undefined ? '' : `Changes are against “${pinned.state.title}” as pinned, drawn dotted in the charts.`;
+  };
+  const showCurves = (): void => {
+    for (const id of curveIds) showChart(id, curves?.charts ?? [], pinned?.exploration?.charts, 'Nothing to draw');
   };
   const partOf = (id: ChartId): HTMLElement | undefined => charts.get(id)?.root;
 
@@ -119,12 +126,16 @@ export function createView(root: HTMLElement, tables: readonly ChartId[], action
         state.absence === undefined ? 'No surfaces in the design' : none,
       );
       if (isNewText || isOtherDesign) {
-        for (const id of ['reflectivity', 'pump', 'repetition_rate'] as const) {
+        curves = undefined;
+        for (const id of curveIds) {
           // Curves of an earlier text stay, marked as such, only while those of this one are on their way.
           if (state.absence === undefined && !isOtherDesign) charts.get(id)?.wait();
           else showChart(id, [], undefined, state.absence === undefined ? 'Being worked out' : none);
         }
         parameters.root.hidden = state.absence !== undefined || isOtherDesign;
+      } else if (curves !== undefined) {
+        // The same text: what is pinned may have changed.
+        showCurves();
       }
       fill(requirements, state.requirements.length === 0 ? undefined : requirementTable(state.requirements));
       fill(surfaces, state.surfaces.length === 0 ? undefined : surfaceTable(state.surfaces));
@@ -135,14 +146,17 @@ export function createView(root: HTMLElement, tables: readonly ChartId[], action
     },
     explored(exploration) {
       if (shown?.version !== exploration.version || shown.uri !== exploration.uri) return;
-      for (const id of ['reflectivity', 'pump', 'repetition_rate'] as const) {
-        showChart(id, exploration.charts, pinned?.exploration?.charts, 'Nothing to draw');
-      }
+      curves = exploration;
+      showCurves();
       parameters.root.hidden = exploration.parameters.length === 0;
       parameterTable.show(exploration.parameters);
     },
     cursor: parameterTable.cursor,
-    unavailable: announce,
+    unavailable(reason) {
+      const ended = /[.!?]$/.test(reason) ? reason : `${reason}.`;
+      // What stands below stays readable, but not as if it were of the text named in the reason.
+      announce(shown === undefined ? ended : `${ended} Below stands what was last read of “${shown.title}”.`);
+    },
   };
 }
 

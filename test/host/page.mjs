@@ -213,10 +213,72 @@ Object.assign(cases, {
     const change = page.locator('.reading', { hasText: 'Pulse energy' }).locator('.change');
     assert.equal((await change.textContent()).trim(), `▲ +${percent} %`);
     assert.match(await page.locator('.pinned-note').textContent(), /pinned/);
-    assert.equal(await page.locator('.legend', { hasText: 'as pinned' }).count(), 4);
+    assert.equal(await page.locator('.legend', { hasText: 'as pinned' }).count(), 5);
+    // Pointing tells values of one place, and those are of the present state.
+    await page.locator('#chart-waveform .chart').focus();
+    for (const key of ['Home', 'End']) await page.keyboard.press(key);
+    assert.match(
+      await page.locator('#chart-waveform .told').textContent(),
+      /Output power [\d.e-]+ MW, Inversion [\d.]+$/,
+    );
     assert.match(await page.locator('#problems').textContent(), /Accepted: a spare window/);
     await show(page, edited);
     assert.equal(await page.locator('.change').count(), 0);
+    await page.close();
+  },
+
+  async 'pinning and unpinning redraws the curves of the same text'() {
+    const page = await open();
+    await show(page, edited);
+    const picture = () => page.locator('#chart-reflectivity canvas').evaluate((canvas) => canvas.toDataURL());
+    const bare = await picture();
+    await show(page, { state: edited.state }, sound);
+    assert.notEqual(await picture(), bare);
+    assert.equal(await page.locator('#chart-reflectivity').getAttribute('aria-busy'), null);
+    await show(page, { state: edited.state });
+    assert.equal(await picture(), bare);
+    assert.equal(await page.locator('.legend', { hasText: 'as pinned' }).count(), 0);
+    await page.close();
+  },
+
+  async 'a table keeps its place and the focus while the text is edited'() {
+    const page = await open({ memory: { uri: sound.state.uri, tables: ['waveform'] } });
+    await show(page, sound);
+    const table = page.locator('#data-waveform .scroll');
+    await table.focus();
+    await table.evaluate((box) => box.scrollTo(0, 200));
+    const firstCell = page.locator('#data-waveform tbody th').first();
+    const before = await firstCell.textContent();
+    await show(page, edited);
+    assert.notEqual(await firstCell.textContent(), before);
+    assert.equal(await table.evaluate((box) => box.scrollTop), 200);
+    assert.match(await focused(page), /^div .*: data/);
+    await page.close();
+  },
+
+  async 'why a design can not be shown is told, and whose figures still stand there'() {
+    const page = await open();
+    await show(page, sound);
+    await tell(page, { type: 'unavailable', reason: 'other.gainmodule.yaml is not open as a gain-module design.' });
+    await page.waitForTimeout(50);
+    assert.match(
+      await page.locator('.notice').textContent(),
+      /^other\.gainmodule\.yaml is not open .* Below stands what was last read of “Hail-sounding lidar transmitter, build C”\.$/,
+    );
+    await show(page, sound);
+    assert.equal(await page.locator('.notice').isHidden(), true);
+    await page.close();
+  },
+
+  async 'nothing is cut off at 300 px'() {
+    const page = await open({ width: 300, memory: { uri: sound.state.uri, tables: ['waveform', 'surfaces'] } });
+    await show(page, edited, sound);
+    await page.screenshot({ path: join(shots, 'page-pinned-300.png'), fullPage: true });
+    const [scrollWidth, clientWidth] = await page.evaluate(() => [
+      document.documentElement.scrollWidth,
+      document.documentElement.clientWidth,
+    ]);
+    assert.ok(clientWidth > 0 && scrollWidth <= clientWidth, `${scrollWidth} px in ${clientWidth}`);
     await page.close();
   },
 
@@ -247,6 +309,23 @@ Object.assign(cases, {
     await tell(page, { type: 'cursor', line });
     await page.waitForTimeout(50);
     assert.match(await page.locator('tr[aria-current="true"]').textContent(), new RegExp(path.replace('.', '\\.')));
+    // Its row comes into view where the table is what the page shows, and the page stays where it is otherwise.
+    const place = () => page.evaluate(() => window.scrollY);
+    assert.equal(await place(), 0);
+    await page.locator('#parameters tbody').evaluate((rows) => rows.scrollIntoView({ block: 'center' }));
+    await page.setViewportSize({ width: 1100, height: 300 });
+    await page
+      .locator('#parameters tbody tr')
+      .nth(8)
+      .evaluate((row) => row.scrollIntoView({ block: 'center' }));
+    const last = sound.exploration.parameters.at(-1);
+    await tell(page, { type: 'cursor', line: last.line });
+    await page.waitForTimeout(50);
+    const { top, bottom } = await page
+      .locator('tr[aria-current="true"]')
+      .last()
+      .evaluate((row) => row.getBoundingClientRect().toJSON());
+    assert.ok(bottom > 0 && top < 300, `the row lies at ${top}`);
     await tell(page, { type: 'cursor', line: 1 });
     await page.waitForTimeout(50);
     assert.equal(await page.locator('tr[aria-current="true"]').count(), 0);
@@ -263,7 +342,12 @@ Object.assign(cases, {
       document.body.className = 'vscode-light';
     }, themes['vscode-light']);
     await page.waitForTimeout(150);
-    assert.notEqual(await picture(), before);
+    const after = await picture();
+    assert.notEqual(after, before);
+    // A single colour of the user's own: the theme stays the same.
+    await page.evaluate(() => document.documentElement.style.setProperty('--vscode-charts-blue', '#aa0000'));
+    await page.waitForTimeout(150);
+    assert.notEqual(await picture(), after);
     await page.close();
   },
 

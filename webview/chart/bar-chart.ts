@@ -10,12 +10,12 @@ import {
 } from 'chart.js';
 import type { Bar, BarChart } from '../../extension/protocol/chart.ts';
 import { createCanvasChart, type DrawnChart } from './canvas-chart.ts';
-import { named, tooltipStyle } from './style.ts';
+import { named, pinnedDash, tooltipStyle } from './style.ts';
 import type { ChartTheme } from './theme.ts';
 
-const longestLabel = 24;
+const longestLine = 20;
 
-/** Draws a bar a surface, its threshold as a solid mark and what keeps the wanted margin as a dashed one. */
+/** Draws a bar a surface, its threshold as a solid mark, what keeps the wanted margin as a dashed one, and the pinned bar as a dotted outline. */
 export function createBarChart(canvas: HTMLCanvasElement): DrawnChart {
   Chart.register(BarController, BarElement, CategoryScale, LinearScale, Tooltip);
   const drawn = createCanvasChart<'bar', number[]>(canvas);
@@ -24,22 +24,37 @@ export function createBarChart(canvas: HTMLCanvasElement): DrawnChart {
     get length() {
       return drawn.length;
     },
-    show(chart) {
+    show(chart, pinned) {
       if (chart.kind !== 'bars') return;
+      const before = pinned?.kind === 'bars' ? pinnedBars(pinned, chart) : [];
       drawn.clear();
-      drawn.draw((theme) => configure(chart, theme));
+      drawn.draw((theme) => configure(chart, before, theme));
     },
   };
 }
 
-function configure({ bars, axis }: BarChart, theme: ChartTheme): ChartConfiguration<'bar', number[]> {
-  const most = Math.max(...bars.map(({ value, limit = 0 }) => Math.max(value, limit)));
+/** The pinned value of each bar of `frame`, in its unit; nothing for a surface that was not there. */
+function pinnedBars(pinned: BarChart, frame: BarChart): readonly (number | undefined)[] {
+  const values = new Map(pinned.bars.map(({ label, value }) => [label, value]));
+  const up = pinned.axis.scale / frame.axis.scale;
+  return frame.bars.map(({ label }) => {
+    const value = values.get(label);
+    return value === undefined ? undefined : value * up;
+  });
+}
+
+function configure(
+  { bars, axis }: BarChart,
+  before: readonly (number | undefined)[],
+  theme: ChartTheme,
+): ChartConfiguration<'bar', number[]> {
+  const most = Math.max(...bars.map(({ value, limit = 0 }, index) => Math.max(value, limit, before[index] ?? 0)));
   const text = { color: theme.text, font: { family: theme.font, size: 11 } };
   return {
     type: 'bar',
-    plugins: [limitsPlugin(bars, theme)],
+    plugins: [limitsPlugin(bars, before, theme)],
     data: {
-      labels: bars.map(({ label }) => (label.length > longestLabel ? `${label.slice(0, longestLabel - 1)}…` : label)),
+      labels: bars.map(({ label }) => twoLines(label)),
       datasets: [
         {
           label: named(axis),
@@ -61,7 +76,8 @@ function configure({ bars, axis }: BarChart, theme: ChartTheme): ChartConfigurat
         x: {
           beginAtZero: true,
           max: most * 1.05,
-          title: { display: true, text: named(axis), ...text },
+          // In lines of their own, so that a narrow page does not cut the words.
+          title: { display: true, text: named(axis).split(/(?<=,) /), ...text },
           ticks: { ...text, maxTicksLimit: 7, includeBounds: false },
           grid: { color: theme.grid },
         },
@@ -86,7 +102,21 @@ function told(bar: Bar | undefined, unit: string): string {
   return `${bar.value.toPrecision(3)}${against} ${unit}`;
 }
 
-function limitsPlugin(bars: readonly Bar[], theme: ChartTheme): Plugin<'bar'> {
+/** A surface's name in two lines at most. */
+function twoLines(label: string): string[] {
+  const lines: string[] = [];
+  for (const word of label.split(' ')) {
+    const last = lines.at(-1);
+    if (last !== undefined && `${last} ${word}`.length <= longestLine) lines[lines.length - 1] = `${last} ${word}`;
+    else lines.push(word);
+  }
+  const [first = '', second, third] = lines;
+  const cut = (line: string, isEnd: boolean): string =>
+    isEnd && line.length <= longestLine ? line : `${line.slice(0, longestLine - 1)}…`;
+  return second === undefined ? [cut(first, true)] : [cut(first, true), cut(second, third === undefined)];
+}
+
+function limitsPlugin(bars: readonly Bar[], before: readonly (number | undefined)[], theme: ChartTheme): Plugin<'bar'> {
   return {
     id: 'limits',
     afterDatasetsDraw(chart) {
@@ -109,6 +139,11 @@ function limitsPlugin(bars: readonly Bar[], theme: ChartTheme): Plugin<'bar'> {
         };
         mark(wanted, [3, 2]);
         mark(limit, []);
+        const pinned = before[index];
+        if (pinned === undefined) return;
+        const start = across.getPixelForValue(0);
+        ctx.setLineDash([...pinnedDash]);
+        ctx.strokeRect(start, middle - 13, across.getPixelForValue(pinned) - start, 26);
       });
       ctx.restore();
     },

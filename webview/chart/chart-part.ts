@@ -1,5 +1,5 @@
 import type { Chart, ChartId } from '../../extension/protocol/chart.ts';
-import { element, section } from '../dom.ts';
+import { element, refill, section } from '../dom.ts';
 import { button, checkbox } from '../ui/index.ts';
 import { createBarChart } from './bar-chart.ts';
 import { dataTable } from './data-table.ts';
@@ -27,7 +27,7 @@ export function createChartPart(id: ChartId, heading: string, tableShown: boolea
   const canvas = element('canvas', { role: 'img', 'aria-label': heading });
   const drawn = id === 'surfaces' ? createBarChart(canvas) : createLineChart(canvas);
   const empty = element('p', { class: 'empty' });
-  const waiting = element('p', { class: 'waiting', role: 'status' });
+  const waiting = element('p', { class: 'waiting' });
   const key = element('div', {});
   const data = element('div', { id: `data-${id}`, hidden: '' });
   const told = element('p', { class: 'told', 'aria-live': 'polite' });
@@ -36,7 +36,8 @@ export function createChartPart(id: ChartId, heading: string, tableShown: boolea
 
   const showTable = (): void => {
     data.hidden = !open || shown === undefined;
-    data.replaceChildren(...(data.hidden || shown === undefined ? [] : [dataTable(shown)]));
+    if (data.hidden || shown === undefined) data.replaceChildren();
+    else refill(data, dataTable(shown));
   };
   const toggle = checkbox({
     label: 'Data table',

@@ -40,5 +40,7 @@ function barTable({ title, axis, bars }: BarChart): HTMLElement {
 
 function digits(value: number | undefined): string {
   if (value === undefined) return '—';
-  return Math.abs(value) >= 1e-3 || value === 0 ? Number(value.toPrecision(4)).toString() : value.toExponential(2);
+  const size = Math.abs(value);
+  if (size === 0 || size >= 1e4) return String(Math.round(value)).replace('-', '−');
+  return (size >= 1e-3 ? value.toPrecision(4) : value.toExponential(2)).replaceAll('-', '−');
 }

@@ -1,5 +1,6 @@
 import type { Chart } from '../../extension/protocol/chart.ts';
 import { element } from '../dom.ts';
+import { pinnedDash } from './style.ts';
 
 const svg = 'http://www.w3.org/2000/svg';
 
@@ -7,14 +8,12 @@ const svg = 'http://www.w3.org/2000/svg';
 export function legend(chart: Chart, pinned: boolean): HTMLElement {
   const entries =
     chart.kind === 'lines'
-      ? [
-          ...chart.lines.map(({ label, axis }) => entry(axis, axis === 'left' ? '' : '7 4', 'M0 4h29', label)),
-          ...(pinned ? [entry('pinned', '1 3', 'M0 4h29', 'as pinned')] : []),
-        ]
+      ? [...chart.lines.map(({ label, axis }) => entry(axis, axis === 'left' ? '' : '7 4', 'M0 4h29', label))]
       : [
-          entry('mark', '', 'M14 0v8', 'damage threshold'),
-          entry('mark', '3 2', 'M14 0v8', 'keeps the wanted safety factor'),
+          entry('mark', '', 'M14 0v14', 'damage threshold'),
+          entry('mark', '3 2', 'M14 0v14', 'keeps the wanted safety factor'),
         ];
+  if (pinned) entries.push(entry('pinned', pinnedDash.join(' '), 'M0 4h29', 'as pinned'));
   return element('ul', { class: 'legend' }, ...entries);
 }
 
@@ -25,7 +24,7 @@ function entry(name: string, dashes: string, path: string, label: string): HTMLE
 function sample(name: string, dashes: string, path: string): SVGSVGElement {
   const picture = document.createElementNS(svg, 'svg');
   picture.setAttribute('class', `sample ${name}`);
-  picture.setAttribute('viewBox', '0 0 29 8');
+  picture.setAttribute('viewBox', `0 0 29 ${name === 'mark' ? 14 : 8}`);
   picture.setAttribute('aria-hidden', 'true');
   const line = document.createElementNS(svg, 'path');
   line.setAttribute('d', path);

@@ -11,12 +11,13 @@ import {
 import type { Axis, LineChart } from '../../extension/protocol/chart.ts';
 import { createCanvasChart, type DrawnChart } from './canvas-chart.ts';
 import { marksPlugin } from './marks.ts';
+import { highestPinned, pinnedPlugin } from './pinned.ts';
 import { named, tooltipStyle } from './style.ts';
 import type { ChartTheme } from './theme.ts';
 
 type Point = { x: number; y: number };
 
-/** Draws curves; `pinned` is the same chart of another state, drawn thin and dotted behind it. */
+/** Draws curves; `pinned` is the same chart of another state, drawn behind them. */
 export function createLineChart(canvas: HTMLCanvasElement): DrawnChart {
   Chart.register(LineController, LineElement, PointElement, LinearScale, LogarithmicScale, Tooltip);
   const drawn = createCanvasChart<'line', Point[]>(canvas);
@@ -41,10 +42,12 @@ function configure(
   theme: ChartTheme,
 ): ChartConfiguration<'line', Point[]> {
   const { x, left, right, marks } = chart;
+  const reach = (side: 'left' | 'right') =>
+    pinned === undefined ? {} : { suggestedMax: highestPinned(pinned, chart, side) };
   return {
     type: 'line',
-    plugins: [marksPlugin(marks, theme)],
-    data: { datasets: [...curves(chart, chart, theme), ...(pinned === undefined ? [] : curves(pinned, chart, theme))] },
+    plugins: [...(pinned === undefined ? [] : [pinnedPlugin(pinned, chart, theme)]), marksPlugin(marks, theme)],
+    data: { datasets: curves(chart, theme) },
     options: {
       animation: false,
       parsing: false,
@@ -58,9 +61,10 @@ function configure(
           min: x.values[0] ?? 0,
           max: x.values.at(-1) ?? 1,
         },
-        left: { ...axis(left, theme), type: 'linear', position: 'left', beginAtZero: true },
+        left: { ...axis(left, theme), ...reach('left'), type: 'linear', position: 'left', beginAtZero: true },
         right: {
           ...axis(right, theme),
+          ...reach('right'),
           type: 'linear',
           position: 'right',
           beginAtZero: true,
@@ -80,24 +84,22 @@ function configure(
   };
 }
 
-/** The curves of `drawn` in the units of `frame`. */
-function curves(drawn: LineChart, frame: LineChart, theme: ChartTheme) {
-  const isPinned = drawn !== frame;
-  return drawn.lines.map(({ label, axis: side, values }) => {
-    const across = drawn.x.scale / frame.x.scale;
-    const up = drawn[side].scale / frame[side].scale;
-    const data = values.map((y, index): Point => ({ x: (drawn.x.values[index] ?? 0) * across, y: y * up }));
-    return {
-      label: `${isPinned ? 'pinned: ' : ''}${label}${frame[side].unit === '' ? '' : ` (${frame[side].unit})`}`,
-      data,
-      yAxisID: side,
-      borderColor: theme[side],
-      borderWidth: isPinned ? 1 : theme.lineWidth,
-      borderDash: isPinned ? [1, 3] : side === 'left' ? [] : [7, 4],
-      pointRadius: 0,
-      pointHitRadius: 8,
-    };
-  });
+function curves(chart: LineChart, theme: ChartTheme) {
+  return chart.lines.map(({ label, axis: side, values }) => ({
+    label: named({ label, unit: chart[side].unit }),
+    data: values.map((y, index): Point => ({ x: chart.x.values[index] ?? 0, y })),
+    yAxisID: side,
+    borderColor: theme[side],
+    borderWidth: theme.lineWidth,
+    borderDash: side === 'left' ? [] : [7, 4],
+    pointRadius: 0,
+    // Points show where they are pointed at, each axis with a shape of its own.
+    pointStyle: side === 'left' ? ('circle' as const) : ('rectRot' as const),
+    pointHoverRadius: 5,
+    pointHoverBackgroundColor: theme.ground,
+    pointHoverBorderColor: theme[side],
+    pointHoverBorderWidth: 2,
+  }));
 }
 
 function axis(shown: Axis, theme: ChartTheme) {

@@ -43,4 +43,6 @@ export function chartTheme(): ChartTheme {
 export function onThemeChange(changed: () => void): void {
   const observer = new MutationObserver(changed);
   observer.observe(document.body, { attributes: true, attributeFilter: ['class', 'data-vscode-theme-id'] });
+  // Where a user sets single colours, the theme stays and only the variables change.
+  observer.observe(document.documentElement, { attributes: true, attributeFilter: ['style'] });
 }

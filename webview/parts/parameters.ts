@@ -1,5 +1,5 @@
 import type { ParameterRow } from '../../extension/protocol/readout.ts';
-import { element, scrolling } from '../dom.ts';
+import { element, quantity, refill, scrolling } from '../dom.ts';
 
 const absent = '—';
 
@@ -15,12 +15,15 @@ export function createParameters(reveal: (line: number) => void): ParametersPart
   const root = element('div', {});
   let rows: readonly { readonly line: number; readonly button: HTMLElement }[] = [];
   let at = 0;
-  const mark = (): void => {
+  const mark = (): HTMLElement | undefined => {
+    let marked: HTMLElement | undefined;
     for (const { line, button } of rows) {
-      const row = button.closest('tr');
+      const row = button.closest('tr') ?? undefined;
       if (line === at) row?.setAttribute('aria-current', 'true');
       else row?.removeAttribute('aria-current');
+      if (line === at) marked ??= row;
     }
+    return marked;
   };
   const columns = [
     { heading: 'Value' },
@@ -34,24 +37,38 @@ export function createParameters(reveal: (line: number) => void): ParametersPart
     root,
     show(parameters) {
       rows = parameters.map(({ path, line }) => {
-        const button = element('button', { type: 'button', class: 'link', title: `Go to line ${line}` }, path);
+        const button = element(
+          'button',
+          { type: 'button', class: 'link', title: `Go to line ${line}` },
+          ...breakable(path),
+        );
         button.addEventListener('click', () => reveal(line));
         return { line, button };
       });
       const cells = parameters.map(({ value, energy, peak, width, margin }, index) => [
         rows[index]?.button,
-        value,
+        quantity(value),
         energy ?? absent,
         peak ?? absent,
         width ?? absent,
         margin ?? absent,
       ]);
-      root.replaceChildren(scrolling('What +1 % of each value does to the pulse', columns, cells));
+      refill(root, scrolling('What +1 % of each value does to the pulse', columns, cells, 'sideways named'));
       mark();
     },
     cursor(line) {
+      if (line === at) return;
       at = line;
-      mark();
+      const row = mark();
+      // Never away from a chart that is being watched: only while this table is what the page shows.
+      const { top, bottom } = root.getBoundingClientRect();
+      const middle = window.innerHeight / 2;
+      if (top < middle && bottom > middle) row?.scrollIntoView({ block: 'nearest' });
     },
   };
+}
+
+/** A path that may continue on the next line behind each of its dots. */
+function breakable(path: string): readonly (Node | string)[] {
+  return path.split(/(?<=\.)/).flatMap((name) => [name, element('wbr', {})]);
 }

@@ -1,5 +1,5 @@
 import type { RequirementRow, SurfaceRow, Verdict } from '../../extension/protocol/readout.ts';
-import { element, scrolling } from '../dom.ts';
+import { element, quantity, scrolling } from '../dom.ts';
 
 const absent = '—';
 const marks: Readonly<Record<Verdict, string>> = { good: '✓', look: '!', bad: '✗', unknown: '?' };
@@ -32,9 +32,9 @@ export function surfaceTable(rows: readonly SurfaceRow[]): HTMLElement {
     columns,
     rows.map(({ name, fluence, threshold, margin, verdict }) => [
       name,
-      fluence,
-      threshold ?? absent,
-      margin ?? absent,
+      quantity(fluence),
+      quantity(threshold ?? absent),
+      quantity(margin ?? absent),
       verdictCell(verdict, surfaceWords),
     ]),
   );
@@ -52,8 +52,8 @@ export function requirementTable(rows: readonly RequirementRow[]): HTMLElement {
     columns,
     rows.map(({ name, required, predicted, verdict }) => [
       name,
-      required,
-      predicted ?? absent,
+      quantity(required),
+      quantity(predicted ?? absent),
       verdictCell(verdict, requirementWords),
     ]),
   );
