@@ -34,17 +34,19 @@ export function quickPick(page, label) {
 
 export async function runCommand(page, title) {
   const input = page.locator('.quick-input-widget input[type="text"]');
-  // A key that comes while the focus moves between editor and readout is lost: press it until the palette is there.
-  for (let attempt = 0; attempt < 6; attempt++) {
-    await page.keyboard.press('F1');
-    const shown = await input.waitFor({ timeout: 3000 }).then(
-      () => true,
-      () => false,
-    );
-    if (shown) break;
+  // A key that comes while the focus moves between editor and readout is lost, and a palette that loses it closes: again.
+  for (let attempt = 0; ; attempt++) {
+    try {
+      await page.keyboard.press('F1');
+      await input.waitFor({ timeout: 3000 });
+      await input.fill(`>${title}`, { timeout: 3000 });
+      await quickPick(page, title).click({ timeout: 5000 });
+      return;
+    } catch (error) {
+      if (attempt >= 5) throw error;
+      await page.keyboard.press('Escape');
+    }
   }
-  await input.fill(`>${title}`);
-  await quickPick(page, title).click();
 }
 
 /** The extension's document in its webview: VS Code's outer frame, then the frame that it shows. */
