@@ -51,9 +51,9 @@ export function refill(holder: HTMLElement, box: HTMLElement): void {
   }
 }
 
-/** A quantity in words; where room is short it breaks between figures, never inside one. */
+/** A quantity in words; where room is short it breaks before a figure, never inside one. */
 export function quantity(text: string): HTMLElement {
-  const pieces = text.split(/(?<!\d) /).map((piece) => element('span', { class: 'whole' }, piece));
+  const pieces = text.split(/ (?=[+−-]?\d)/).map((piece) => element('span', { class: 'whole' }, piece));
   return element('span', {}, ...pieces.flatMap((piece, index) => (index === 0 ? [piece] : [' ', piece])));
 }
 

@@ -15,7 +15,7 @@ import type { ChartTheme } from './theme.ts';
 
 const longestLine = 20;
 
-/** Draws a bar a surface, its threshold as a solid mark, what keeps the wanted margin as a dashed one, and the pinned bar as a dotted outline. */
+/** Draws a bar a surface, its threshold as a solid mark, what keeps the wanted margin as a dashed one, and the pinned value as a dotted line below. */
 export function createBarChart(canvas: HTMLCanvasElement): DrawnChart {
   Chart.register(BarController, BarElement, CategoryScale, LinearScale, Tooltip);
   const drawn = createCanvasChart<'bar', number[]>(canvas);
@@ -49,6 +49,7 @@ function configure(
   theme: ChartTheme,
 ): ChartConfiguration<'bar', number[]> {
   const most = Math.max(...bars.map(({ value, limit = 0 }, index) => Math.max(value, limit, before[index] ?? 0)));
+  const colours = bars.map(({ verdict }) => (verdict === 'bad' ? theme.bad : theme.left));
   const text = { color: theme.text, font: { family: theme.font, size: 11 } };
   return {
     type: 'bar',
@@ -59,9 +60,9 @@ function configure(
         {
           label: named(axis),
           data: bars.map(({ value }) => value),
-          backgroundColor: bars.map(({ verdict }) => (verdict === 'bad' ? theme.bad : theme.left)),
-          borderColor: theme.text,
-          borderWidth: 1,
+          backgroundColor: theme.hollow ? theme.ground : colours,
+          borderColor: theme.hollow ? colours : theme.text,
+          borderWidth: theme.hollow ? 2 : 1,
           maxBarThickness: 22,
         },
       ],
@@ -141,9 +142,11 @@ function limitsPlugin(bars: readonly Bar[], before: readonly (number | undefined
         mark(limit, []);
         const pinned = before[index];
         if (pinned === undefined) return;
-        const start = across.getPixelForValue(0);
         ctx.setLineDash([...pinnedDash]);
-        ctx.strokeRect(start, middle - 13, across.getPixelForValue(pinned) - start, 26);
+        ctx.beginPath();
+        ctx.moveTo(across.getPixelForValue(0), middle + 17);
+        ctx.lineTo(across.getPixelForValue(pinned), middle + 17);
+        ctx.stroke();
       });
       ctx.restore();
     },

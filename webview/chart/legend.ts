@@ -10,8 +10,8 @@ export function legend(chart: Chart, pinned: boolean): HTMLElement {
     chart.kind === 'lines'
       ? [...chart.lines.map(({ label, axis }) => entry(axis, axis === 'left' ? '' : '7 4', 'M0 4h29', label))]
       : [
-          entry('mark', '', 'M14 0v14', 'damage threshold'),
-          entry('mark', '3 2', 'M14 0v14', 'keeps the wanted safety factor'),
+          entry('limit', '', 'M14 0v14', 'damage threshold'),
+          entry('limit', '3 2', 'M14 0v14', 'keeps the wanted safety factor'),
         ];
   if (pinned) entries.push(entry('pinned', pinnedDash.join(' '), 'M0 4h29', 'as pinned'));
   return element('ul', { class: 'legend' }, ...entries);
@@ -24,7 +24,7 @@ function entry(name: string, dashes: string, path: string, label: string): HTMLE
 function sample(name: string, dashes: string, path: string): SVGSVGElement {
   const picture = document.createElementNS(svg, 'svg');
   picture.setAttribute('class', `sample ${name}`);
-  picture.setAttribute('viewBox', `0 0 29 ${name === 'mark' ? 14 : 8}`);
+  picture.setAttribute('viewBox', `0 0 29 ${name === 'limit' ? 14 : 8}`);
   picture.setAttribute('aria-hidden', 'true');
   const line = document.createElementNS(svg, 'path');
   line.setAttribute('d', path);

@@ -9,6 +9,8 @@ export interface ChartTheme {
   readonly border: string;
   readonly bad: string;
   readonly font: string;
+  /** Outlines instead of filled shapes, where a mark upon them would be of their own colour. */
+  readonly hollow: boolean;
   /** Thicker where the theme asks for high contrast. */
   readonly lineWidth: number;
 }
@@ -35,6 +37,7 @@ export function chartTheme(): ChartTheme {
     border: colour(['--vscode-contrastBorder', '--vscode-editorHoverWidget-border'], text),
     bad: colour(['--vscode-editorError-foreground', '--vscode-errorForeground'], text),
     font: colour(['--vscode-font-family'], 'sans-serif'),
+    hollow: highContrast,
     lineWidth: highContrast ? 2.5 : 1.75,
   };
 }

@@ -48,10 +48,7 @@ export function createParameters(reveal: (line: number) => void): ParametersPart
       const cells = parameters.map(({ value, energy, peak, width, margin }, index) => [
         rows[index]?.button,
         quantity(value),
-        energy ?? absent,
-        peak ?? absent,
-        width ?? absent,
-        margin ?? absent,
+        ...[energy, peak, width, margin].map((effect) => quantity(effect ?? absent)),
       ]);
       refill(root, scrolling('What +1 % of each value does to the pulse', columns, cells, 'sideways named'));
       mark();
@@ -68,7 +65,7 @@ export function createParameters(reveal: (line: number) => void): ParametersPart
   };
 }
 
-/** A path that may continue on the next line behind each of its dots. */
+/** A path that may continue on the next line between the words of its names. */
 function breakable(path: string): readonly (Node | string)[] {
-  return path.split(/(?<=\.)/).flatMap((name) => [name, element('wbr', {})]);
+  return path.split(/(?<=[._])/).flatMap((name) => [name, element('wbr', {})]);
 }
